@@ -1,0 +1,114 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * An amount of substance.
+ *
+ * <p>SI unit mol. Any finite value exists. Immutable and thread-safe.
+ */
+public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<AmountOfSubstance, AmountOfSubstance> KIND = QuantityKind.linear(
+            "amount of substance",
+            AmountOfSubstance.class,
+            new Dimension(0, 0, 0, 0, 1, 0),
+            AmountOfSubstance::new,
+            1,
+            List.of(Units.MOLE, Units.KILOMOLE));
+
+    private AmountOfSubstance(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return an amount of substance}
+     *
+     * @param value amount of substance in moles
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static AmountOfSubstance moles(double value) {
+        return new AmountOfSubstance(value);
+    }
+
+    /**
+     * {@return an amount of substance}
+     *
+     * @param value amount of substance in kilomoles
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static AmountOfSubstance kilomoles(double value) {
+        return new AmountOfSubstance(Units.KILOMOLE.toSi(value));
+    }
+
+    /**
+     * {@return an amount of substance from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static AmountOfSubstance of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the amount of substance that a text states, such as {@code "12.5 mol"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static AmountOfSubstance parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in moles} */
+    public double inMoles() {
+        return si();
+    }
+
+    /** {@return the value in kilomoles} */
+    public double inKilomoles() {
+        return Units.KILOMOLE.fromSi(si());
+    }
+
+    /**
+     * {@return the product with a molar mass}
+     *
+     * @param molarMass the other factor
+     */
+    public Mass times(MolarMass molarMass) {
+        return Mass.kilograms(si() * molarMass.si());
+    }
+
+    /**
+     * {@return the product with a molar energy}
+     *
+     * @param molarEnergy the other factor
+     */
+    public Energy times(MolarEnergy molarEnergy) {
+        return Energy.joules(si() * molarEnergy.si());
+    }
+
+    /**
+     * {@return the quotient with a duration}
+     *
+     * @param duration the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public MolarFlow over(Duration duration) {
+        return MolarFlow.molesPerSecond(si() / duration.si());
+    }
+
+    @Override
+    public QuantityKind<AmountOfSubstance, AmountOfSubstance> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected AmountOfSubstance with(double si) {
+        return new AmountOfSubstance(si);
+    }
+}

@@ -1,0 +1,122 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * An area.
+ *
+ * <p>SI unit m². Any finite value exists. Immutable and thread-safe.
+ */
+public final class Area extends LinearQuantity<Area> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<Area, Area> KIND = QuantityKind.linear(
+            "area",
+            Area.class,
+            new Dimension(2, 0, 0, 0, 0, 0),
+            Area::new,
+            10,
+            List.of(Units.SQUARE_METRE, Units.SQUARE_FOOT));
+
+    private Area(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return an area}
+     *
+     * @param value area in square metres
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Area squareMetres(double value) {
+        return new Area(value);
+    }
+
+    /**
+     * {@return an area}
+     *
+     * @param value area in square feet
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Area squareFeet(double value) {
+        return new Area(Units.SQUARE_FOOT.toSi(value));
+    }
+
+    /**
+     * {@return an area from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static Area of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the area that a text states, such as {@code "12.5 m²"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static Area parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in square metres} */
+    public double inSquareMetres() {
+        return si();
+    }
+
+    /** {@return the value in square feet} */
+    public double inSquareFeet() {
+        return Units.SQUARE_FOOT.fromSi(si());
+    }
+
+    /**
+     * {@return the product with a heat flux}
+     *
+     * @param heatFlux the other factor
+     */
+    public Power times(HeatFlux heatFlux) {
+        return Power.watts(si() * heatFlux.si());
+    }
+
+    /**
+     * {@return the product with a heat transfer coefficient}
+     *
+     * @param heatTransferCoefficient the other factor
+     */
+    public Conductance times(HeatTransferCoefficient heatTransferCoefficient) {
+        return Conductance.wattsPerKelvin(si() * heatTransferCoefficient.si());
+    }
+
+    /**
+     * {@return the product with a speed}
+     *
+     * @param speed the other factor
+     */
+    public VolumeFlow times(Speed speed) {
+        return VolumeFlow.cubicMetresPerSecond(si() * speed.si());
+    }
+
+    /**
+     * {@return the product with a length}
+     *
+     * @param length the other factor
+     */
+    public Volume times(Length length) {
+        return Volume.cubicMetres(si() * length.si());
+    }
+
+    @Override
+    public QuantityKind<Area, Area> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected Area with(double si) {
+        return new Area(si);
+    }
+}

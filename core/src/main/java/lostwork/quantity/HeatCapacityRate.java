@@ -1,0 +1,95 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * A mass flow times its specific heat capacity.
+ *
+ * <p>SI unit W/K. Any finite value exists. Immutable and thread-safe.
+ */
+public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<HeatCapacityRate, HeatCapacityRate> KIND = QuantityKind.linear(
+            "heat capacity rate",
+            HeatCapacityRate.class,
+            new Dimension(2, 1, -3, -1, 0, 0),
+            HeatCapacityRate::new,
+            1e3,
+            List.of(Units.KILOWATT_PER_KELVIN_CAPACITY, Units.WATT_PER_KELVIN_CAPACITY));
+
+    private HeatCapacityRate(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a heat capacity rate}
+     *
+     * @param value heat capacity rate in kilowatts per kelvin
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static HeatCapacityRate kilowattsPerKelvin(double value) {
+        return new HeatCapacityRate(Units.KILOWATT_PER_KELVIN_CAPACITY.toSi(value));
+    }
+
+    /**
+     * {@return a heat capacity rate}
+     *
+     * @param value heat capacity rate in watts per kelvin
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static HeatCapacityRate wattsPerKelvin(double value) {
+        return new HeatCapacityRate(value);
+    }
+
+    /**
+     * {@return a heat capacity rate from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static HeatCapacityRate of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the heat capacity rate that a text states, such as {@code "12.5 kW/K"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static HeatCapacityRate parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in kilowatts per kelvin} */
+    public double inKilowattsPerKelvin() {
+        return Units.KILOWATT_PER_KELVIN_CAPACITY.fromSi(si());
+    }
+
+    /** {@return the value in watts per kelvin} */
+    public double inWattsPerKelvin() {
+        return si();
+    }
+
+    /**
+     * {@return the product with a temperature span}
+     *
+     * @param temperatureSpan the other factor
+     */
+    public Power times(TemperatureSpan temperatureSpan) {
+        return Power.watts(si() * temperatureSpan.si());
+    }
+
+    @Override
+    public QuantityKind<HeatCapacityRate, HeatCapacityRate> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected HeatCapacityRate with(double si) {
+        return new HeatCapacityRate(si);
+    }
+}

@@ -1,0 +1,125 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * A length.
+ *
+ * <p>SI unit m. Any finite value exists. Immutable and thread-safe.
+ */
+public final class Length extends LinearQuantity<Length> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<Length, Length> KIND = QuantityKind.linear(
+            "length",
+            Length.class,
+            new Dimension(1, 0, 0, 0, 0, 0),
+            Length::new,
+            1,
+            List.of(Units.METRE, Units.MILLIMETRE, Units.FOOT, Units.INCH));
+
+    private Length(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a length}
+     *
+     * @param value length in metres
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Length metres(double value) {
+        return new Length(value);
+    }
+
+    /**
+     * {@return a length}
+     *
+     * @param value length in millimetres
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Length millimetres(double value) {
+        return new Length(Units.MILLIMETRE.toSi(value));
+    }
+
+    /**
+     * {@return a length}
+     *
+     * @param value length in feet
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Length feet(double value) {
+        return new Length(Units.FOOT.toSi(value));
+    }
+
+    /**
+     * {@return a length}
+     *
+     * @param value length in inches
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Length inches(double value) {
+        return new Length(Units.INCH.toSi(value));
+    }
+
+    /**
+     * {@return a length from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static Length of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the length that a text states, such as {@code "12.5 m"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static Length parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in metres} */
+    public double inMetres() {
+        return si();
+    }
+
+    /** {@return the value in millimetres} */
+    public double inMillimetres() {
+        return Units.MILLIMETRE.fromSi(si());
+    }
+
+    /** {@return the value in feet} */
+    public double inFeet() {
+        return Units.FOOT.fromSi(si());
+    }
+
+    /** {@return the value in inches} */
+    public double inInches() {
+        return Units.INCH.fromSi(si());
+    }
+
+    /**
+     * {@return the product with a length}
+     *
+     * @param length the other factor
+     */
+    public Area times(Length length) {
+        return Area.squareMetres(si() * length.si());
+    }
+
+    @Override
+    public QuantityKind<Length, Length> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected Length with(double si) {
+        return new Length(si);
+    }
+}

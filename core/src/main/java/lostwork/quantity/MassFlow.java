@@ -1,0 +1,210 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * A mass per time (mass flow rate).
+ *
+ * <p>SI unit kg/s. Any finite value exists. Immutable and thread-safe.
+ */
+public final class MassFlow extends LinearQuantity<MassFlow> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<MassFlow, MassFlow> KIND = QuantityKind.linear(
+            "mass flow",
+            MassFlow.class,
+            new Dimension(0, 1, -1, 0, 0, 0),
+            MassFlow::new,
+            1,
+            List.of(
+                    Units.KILOGRAM_PER_SECOND,
+                    Units.KILOGRAM_PER_HOUR,
+                    Units.TONNE_PER_HOUR,
+                    Units.TONNE_PER_DAY,
+                    Units.POUND_PER_HOUR));
+
+    private MassFlow(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a mass flow}
+     *
+     * @param value mass flow in kilograms per second
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MassFlow kilogramsPerSecond(double value) {
+        return new MassFlow(value);
+    }
+
+    /**
+     * {@return a mass flow}
+     *
+     * @param value mass flow in kilograms per hour
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MassFlow kilogramsPerHour(double value) {
+        return new MassFlow(Units.KILOGRAM_PER_HOUR.toSi(value));
+    }
+
+    /**
+     * {@return a mass flow}
+     *
+     * @param value mass flow in tonnes per hour
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MassFlow tonnesPerHour(double value) {
+        return new MassFlow(Units.TONNE_PER_HOUR.toSi(value));
+    }
+
+    /**
+     * {@return a mass flow}
+     *
+     * @param value mass flow in tonnes per day
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MassFlow tonnesPerDay(double value) {
+        return new MassFlow(Units.TONNE_PER_DAY.toSi(value));
+    }
+
+    /**
+     * {@return a mass flow}
+     *
+     * @param value mass flow in pounds per hour
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MassFlow poundsPerHour(double value) {
+        return new MassFlow(Units.POUND_PER_HOUR.toSi(value));
+    }
+
+    /**
+     * {@return a mass flow from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static MassFlow of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the mass flow that a text states, such as {@code "12.5 kg/s"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static MassFlow parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in kilograms per second} */
+    public double inKilogramsPerSecond() {
+        return si();
+    }
+
+    /** {@return the value in kilograms per hour} */
+    public double inKilogramsPerHour() {
+        return Units.KILOGRAM_PER_HOUR.fromSi(si());
+    }
+
+    /** {@return the value in tonnes per hour} */
+    public double inTonnesPerHour() {
+        return Units.TONNE_PER_HOUR.fromSi(si());
+    }
+
+    /** {@return the value in tonnes per day} */
+    public double inTonnesPerDay() {
+        return Units.TONNE_PER_DAY.fromSi(si());
+    }
+
+    /** {@return the value in pounds per hour} */
+    public double inPoundsPerHour() {
+        return Units.POUND_PER_HOUR.fromSi(si());
+    }
+
+    /**
+     * {@return the product with a specific energy}
+     *
+     * @param specificEnergy the other factor
+     */
+    public Power times(SpecificEnergy specificEnergy) {
+        return Power.watts(si() * specificEnergy.si());
+    }
+
+    /**
+     * {@return the product with a specific entropy}
+     *
+     * @param specificEntropy the other factor
+     */
+    public EntropyRate times(SpecificEntropy specificEntropy) {
+        return EntropyRate.wattsPerKelvin(si() * specificEntropy.si());
+    }
+
+    /**
+     * {@return the product with a specific volume}
+     *
+     * @param specificVolume the other factor
+     */
+    public VolumeFlow times(SpecificVolume specificVolume) {
+        return VolumeFlow.cubicMetresPerSecond(si() * specificVolume.si());
+    }
+
+    /**
+     * {@return the product with a specific heat capacity}
+     *
+     * @param specificHeatCapacity the other factor
+     */
+    public HeatCapacityRate times(SpecificHeatCapacity specificHeatCapacity) {
+        return HeatCapacityRate.wattsPerKelvin(si() * specificHeatCapacity.si());
+    }
+
+    /**
+     * {@return the product with a duration}
+     *
+     * @param duration the other factor
+     */
+    public Mass times(Duration duration) {
+        return Mass.kilograms(si() * duration.si());
+    }
+
+    /**
+     * {@return the product with a mass price}
+     *
+     * @param massPrice the other factor
+     */
+    public MoneyRate times(MassPrice massPrice) {
+        return MoneyRate.perSecond(si() * massPrice.si());
+    }
+
+    /**
+     * {@return the quotient with a molar mass}
+     *
+     * @param molarMass the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public MolarFlow over(MolarMass molarMass) {
+        return MolarFlow.molesPerSecond(si() / molarMass.si());
+    }
+
+    /**
+     * {@return the quotient with a density}
+     *
+     * @param density the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public VolumeFlow over(Density density) {
+        return VolumeFlow.cubicMetresPerSecond(si() / density.si());
+    }
+
+    @Override
+    public QuantityKind<MassFlow, MassFlow> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected MassFlow with(double si) {
+        return new MassFlow(si);
+    }
+}

@@ -1,0 +1,114 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * An energy per amount of substance.
+ *
+ * <p>SI unit J/mol. Any finite value exists. Immutable and thread-safe.
+ */
+public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<MolarEnergy, MolarEnergy> KIND = QuantityKind.linear(
+            "molar energy",
+            MolarEnergy.class,
+            new Dimension(2, 1, -2, 0, -1, 0),
+            MolarEnergy::new,
+            1e4,
+            List.of(Units.KILOJOULE_PER_MOLE, Units.JOULE_PER_MOLE));
+
+    private MolarEnergy(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a molar energy}
+     *
+     * @param value molar energy in kilojoules per mole
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarEnergy kilojoulesPerMole(double value) {
+        return new MolarEnergy(Units.KILOJOULE_PER_MOLE.toSi(value));
+    }
+
+    /**
+     * {@return a molar energy}
+     *
+     * @param value molar energy in joules per mole
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarEnergy joulesPerMole(double value) {
+        return new MolarEnergy(value);
+    }
+
+    /**
+     * {@return a molar energy from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static MolarEnergy of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the molar energy that a text states, such as {@code "12.5 kJ/mol"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static MolarEnergy parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in kilojoules per mole} */
+    public double inKilojoulesPerMole() {
+        return Units.KILOJOULE_PER_MOLE.fromSi(si());
+    }
+
+    /** {@return the value in joules per mole} */
+    public double inJoulesPerMole() {
+        return si();
+    }
+
+    /**
+     * {@return the quotient with a molar mass}
+     *
+     * @param molarMass the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public SpecificEnergy over(MolarMass molarMass) {
+        return SpecificEnergy.joulesPerKilogram(si() / molarMass.si());
+    }
+
+    /**
+     * {@return the product with a molar flow}
+     *
+     * @param molarFlow the other factor
+     */
+    public Power times(MolarFlow molarFlow) {
+        return Power.watts(si() * molarFlow.si());
+    }
+
+    /**
+     * {@return the product with an amount of substance}
+     *
+     * @param amountOfSubstance the other factor
+     */
+    public Energy times(AmountOfSubstance amountOfSubstance) {
+        return Energy.joules(si() * amountOfSubstance.si());
+    }
+
+    @Override
+    public QuantityKind<MolarEnergy, MolarEnergy> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected MolarEnergy with(double si) {
+        return new MolarEnergy(si);
+    }
+}

@@ -1,0 +1,150 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * An amount of substance per time.
+ *
+ * <p>SI unit mol/s. Any finite value exists. Immutable and thread-safe.
+ */
+public final class MolarFlow extends LinearQuantity<MolarFlow> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<MolarFlow, MolarFlow> KIND = QuantityKind.linear(
+            "molar flow",
+            MolarFlow.class,
+            new Dimension(0, 0, -1, 0, 1, 0),
+            MolarFlow::new,
+            10,
+            List.of(Units.MOLE_PER_SECOND, Units.KILOMOLE_PER_HOUR));
+
+    private MolarFlow(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a molar flow}
+     *
+     * @param value molar flow in moles per second
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarFlow molesPerSecond(double value) {
+        return new MolarFlow(value);
+    }
+
+    /**
+     * {@return a molar flow}
+     *
+     * @param value molar flow in kilomoles per hour
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarFlow kilomolesPerHour(double value) {
+        return new MolarFlow(Units.KILOMOLE_PER_HOUR.toSi(value));
+    }
+
+    /**
+     * {@return a molar flow from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static MolarFlow of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the molar flow that a text states, such as {@code "12.5 mol/s"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static MolarFlow parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in moles per second} */
+    public double inMolesPerSecond() {
+        return si();
+    }
+
+    /** {@return the value in kilomoles per hour} */
+    public double inKilomolesPerHour() {
+        return Units.KILOMOLE_PER_HOUR.fromSi(si());
+    }
+
+    /**
+     * {@return the product with a molar mass}
+     *
+     * @param molarMass the other factor
+     */
+    public MassFlow times(MolarMass molarMass) {
+        return MassFlow.kilogramsPerSecond(si() * molarMass.si());
+    }
+
+    /**
+     * {@return the product with a molar energy}
+     *
+     * @param molarEnergy the other factor
+     */
+    public Power times(MolarEnergy molarEnergy) {
+        return Power.watts(si() * molarEnergy.si());
+    }
+
+    /**
+     * {@return the product with a molar entropy}
+     *
+     * @param molarEntropy the other factor
+     */
+    public EntropyRate times(MolarEntropy molarEntropy) {
+        return EntropyRate.wattsPerKelvin(si() * molarEntropy.si());
+    }
+
+    /**
+     * {@return the product with a molar volume}
+     *
+     * @param molarVolume the other factor
+     */
+    public VolumeFlow times(MolarVolume molarVolume) {
+        return VolumeFlow.cubicMetresPerSecond(si() * molarVolume.si());
+    }
+
+    /**
+     * {@return the product with a duration}
+     *
+     * @param duration the other factor
+     */
+    public AmountOfSubstance times(Duration duration) {
+        return AmountOfSubstance.moles(si() * duration.si());
+    }
+
+    /**
+     * {@return the molar flow of an ideal gas from its volume flow counted at a normal condition}
+     *
+     * @param value volume flow in cubic metres per hour at the normal condition
+     * @param condition the temperature and pressure that the volume is counted at
+     */
+    public static MolarFlow normalCubicMetresPerHour(double value, NormalCondition condition) {
+        return new MolarFlow(value / 3600 / condition.molarVolume().si());
+    }
+
+    /**
+     * {@return the volume flow of an ideal gas in cubic metres per hour, counted at a normal condition}
+     *
+     * @param condition the temperature and pressure that the volume is counted at
+     */
+    public double inNormalCubicMetresPerHour(NormalCondition condition) {
+        return si() * condition.molarVolume().si() * 3600;
+    }
+
+    @Override
+    public QuantityKind<MolarFlow, MolarFlow> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected MolarFlow with(double si) {
+        return new MolarFlow(si);
+    }
+}

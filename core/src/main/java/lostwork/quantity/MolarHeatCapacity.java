@@ -1,0 +1,90 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * A heat capacity per amount of substance.
+ *
+ * <p>SI unit J/(mol K). Any finite value exists. Immutable and thread-safe.
+ */
+public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<MolarHeatCapacity, MolarHeatCapacity> KIND = QuantityKind.linear(
+            "molar heat capacity",
+            MolarHeatCapacity.class,
+            new Dimension(2, 1, -2, -1, -1, 0),
+            MolarHeatCapacity::new,
+            30,
+            List.of(Units.JOULE_PER_MOLE_KELVIN_CAPACITY));
+
+    private MolarHeatCapacity(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a molar heat capacity}
+     *
+     * @param value molar heat capacity in joules per mole and kelvin
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarHeatCapacity joulesPerMoleKelvin(double value) {
+        return new MolarHeatCapacity(value);
+    }
+
+    /**
+     * {@return a molar heat capacity from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static MolarHeatCapacity of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the molar heat capacity that a text states, such as {@code "12.5 J/(mol K)"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static MolarHeatCapacity parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in joules per mole and kelvin} */
+    public double inJoulesPerMoleKelvin() {
+        return si();
+    }
+
+    /**
+     * {@return the quotient with a molar mass}
+     *
+     * @param molarMass the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public SpecificHeatCapacity over(MolarMass molarMass) {
+        return SpecificHeatCapacity.joulesPerKilogramKelvin(si() / molarMass.si());
+    }
+
+    /**
+     * {@return the product with a temperature span}
+     *
+     * @param temperatureSpan the other factor
+     */
+    public MolarEnergy times(TemperatureSpan temperatureSpan) {
+        return MolarEnergy.joulesPerMole(si() * temperatureSpan.si());
+    }
+
+    @Override
+    public QuantityKind<MolarHeatCapacity, MolarHeatCapacity> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected MolarHeatCapacity with(double si) {
+        return new MolarHeatCapacity(si);
+    }
+}

@@ -1,0 +1,104 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * A mass per amount of substance.
+ *
+ * <p>SI unit kg/mol. Any finite value exists. Immutable and thread-safe.
+ */
+public final class MolarMass extends LinearQuantity<MolarMass> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<MolarMass, MolarMass> KIND = QuantityKind.linear(
+            "molar mass",
+            MolarMass.class,
+            new Dimension(0, 1, 0, 0, -1, 0),
+            MolarMass::new,
+            0.03,
+            List.of(Units.GRAM_PER_MOLE, Units.KILOGRAM_PER_MOLE));
+
+    private MolarMass(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a molar mass}
+     *
+     * @param value molar mass in grams per mole
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarMass gramsPerMole(double value) {
+        return new MolarMass(Units.GRAM_PER_MOLE.toSi(value));
+    }
+
+    /**
+     * {@return a molar mass}
+     *
+     * @param value molar mass in kilograms per mole
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static MolarMass kilogramsPerMole(double value) {
+        return new MolarMass(value);
+    }
+
+    /**
+     * {@return a molar mass from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static MolarMass of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the molar mass that a text states, such as {@code "12.5 g/mol"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static MolarMass parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in grams per mole} */
+    public double inGramsPerMole() {
+        return Units.GRAM_PER_MOLE.fromSi(si());
+    }
+
+    /** {@return the value in kilograms per mole} */
+    public double inKilogramsPerMole() {
+        return si();
+    }
+
+    /**
+     * {@return the product with an amount of substance}
+     *
+     * @param amountOfSubstance the other factor
+     */
+    public Mass times(AmountOfSubstance amountOfSubstance) {
+        return Mass.kilograms(si() * amountOfSubstance.si());
+    }
+
+    /**
+     * {@return the product with a molar flow}
+     *
+     * @param molarFlow the other factor
+     */
+    public MassFlow times(MolarFlow molarFlow) {
+        return MassFlow.kilogramsPerSecond(si() * molarFlow.si());
+    }
+
+    @Override
+    public QuantityKind<MolarMass, MolarMass> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected MolarMass with(double si) {
+        return new MolarMass(si);
+    }
+}

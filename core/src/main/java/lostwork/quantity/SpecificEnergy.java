@@ -1,0 +1,183 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * An energy per mass: specific enthalpy, internal energy, exergy, work.
+ *
+ * <p>SI unit J/kg. Any finite value exists. Immutable and thread-safe.
+ */
+public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<SpecificEnergy, SpecificEnergy> KIND = QuantityKind.linear(
+            "specific energy",
+            SpecificEnergy.class,
+            new Dimension(2, 0, -2, 0, 0, 0),
+            SpecificEnergy::new,
+            1e5,
+            List.of(
+                    Units.KILOJOULE_PER_KILOGRAM,
+                    Units.JOULE_PER_KILOGRAM,
+                    Units.MEGAJOULE_PER_KILOGRAM,
+                    Units.KILOWATT_HOUR_PER_KILOGRAM,
+                    Units.BTU_PER_POUND));
+
+    private SpecificEnergy(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a specific energy}
+     *
+     * @param value specific energy in kilojoules per kilogram
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static SpecificEnergy kilojoulesPerKilogram(double value) {
+        return new SpecificEnergy(Units.KILOJOULE_PER_KILOGRAM.toSi(value));
+    }
+
+    /**
+     * {@return a specific energy}
+     *
+     * @param value specific energy in joules per kilogram
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static SpecificEnergy joulesPerKilogram(double value) {
+        return new SpecificEnergy(value);
+    }
+
+    /**
+     * {@return a specific energy}
+     *
+     * @param value specific energy in megajoules per kilogram
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static SpecificEnergy megajoulesPerKilogram(double value) {
+        return new SpecificEnergy(Units.MEGAJOULE_PER_KILOGRAM.toSi(value));
+    }
+
+    /**
+     * {@return a specific energy}
+     *
+     * @param value specific energy in kilowatt hours per kilogram
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static SpecificEnergy kilowattHoursPerKilogram(double value) {
+        return new SpecificEnergy(Units.KILOWATT_HOUR_PER_KILOGRAM.toSi(value));
+    }
+
+    /**
+     * {@return a specific energy}
+     *
+     * @param value specific energy in British thermal units (International Table) per pound
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static SpecificEnergy btuPerPound(double value) {
+        return new SpecificEnergy(Units.BTU_PER_POUND.toSi(value));
+    }
+
+    /**
+     * {@return a specific energy from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static SpecificEnergy of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the specific energy that a text states, such as {@code "12.5 kJ/kg"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static SpecificEnergy parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in kilojoules per kilogram} */
+    public double inKilojoulesPerKilogram() {
+        return Units.KILOJOULE_PER_KILOGRAM.fromSi(si());
+    }
+
+    /** {@return the value in joules per kilogram} */
+    public double inJoulesPerKilogram() {
+        return si();
+    }
+
+    /** {@return the value in megajoules per kilogram} */
+    public double inMegajoulesPerKilogram() {
+        return Units.MEGAJOULE_PER_KILOGRAM.fromSi(si());
+    }
+
+    /** {@return the value in kilowatt hours per kilogram} */
+    public double inKilowattHoursPerKilogram() {
+        return Units.KILOWATT_HOUR_PER_KILOGRAM.fromSi(si());
+    }
+
+    /** {@return the value in British thermal units (International Table) per pound} */
+    public double inBtuPerPound() {
+        return Units.BTU_PER_POUND.fromSi(si());
+    }
+
+    /**
+     * {@return the product with a mass flow}
+     *
+     * @param massFlow the other factor
+     */
+    public Power times(MassFlow massFlow) {
+        return Power.watts(si() * massFlow.si());
+    }
+
+    /**
+     * {@return the product with a mass}
+     *
+     * @param mass the other factor
+     */
+    public Energy times(Mass mass) {
+        return Energy.joules(si() * mass.si());
+    }
+
+    /**
+     * {@return the product with a molar mass}
+     *
+     * @param molarMass the other factor
+     */
+    public MolarEnergy times(MolarMass molarMass) {
+        return MolarEnergy.joulesPerMole(si() * molarMass.si());
+    }
+
+    /**
+     * {@return the quotient with a temperature span}
+     *
+     * @param temperatureSpan the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public SpecificHeatCapacity over(TemperatureSpan temperatureSpan) {
+        return SpecificHeatCapacity.joulesPerKilogramKelvin(si() / temperatureSpan.si());
+    }
+
+    /**
+     * {@return the quotient with a specific heat capacity}
+     *
+     * @param specificHeatCapacity the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public TemperatureSpan over(SpecificHeatCapacity specificHeatCapacity) {
+        return TemperatureSpan.kelvins(si() / specificHeatCapacity.si());
+    }
+
+    @Override
+    public QuantityKind<SpecificEnergy, SpecificEnergy> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected SpecificEnergy with(double si) {
+        return new SpecificEnergy(si);
+    }
+}

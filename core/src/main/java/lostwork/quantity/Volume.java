@@ -1,0 +1,115 @@
+package lostwork.quantity;
+
+import java.util.List;
+import javax.measure.Quantity;
+
+/**
+ * A volume.
+ *
+ * <p>SI unit m³. Any finite value exists. Immutable and thread-safe.
+ */
+public final class Volume extends LinearQuantity<Volume> {
+    private static final long serialVersionUID = 1L;
+
+    /** Name, units, bounds and scale of this quantity. */
+    public static final QuantityKind<Volume, Volume> KIND = QuantityKind.linear(
+            "volume",
+            Volume.class,
+            new Dimension(3, 0, 0, 0, 0, 0),
+            Volume::new,
+            1,
+            List.of(Units.CUBIC_METRE, Units.LITRE));
+
+    private Volume(double si) {
+        super(si, KIND);
+    }
+
+    /**
+     * {@return a volume}
+     *
+     * @param value volume in cubic metres
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Volume cubicMetres(double value) {
+        return new Volume(value);
+    }
+
+    /**
+     * {@return a volume}
+     *
+     * @param value volume in litres
+     * @throws IllegalArgumentException if the value is NaN or infinite
+     */
+    public static Volume litres(double value) {
+        return new Volume(Units.LITRE.toSi(value));
+    }
+
+    /**
+     * {@return a volume from a JSR-385 quantity in any unit of the same dimension}
+     *
+     * @param quantity the quantity
+     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     */
+    public static Volume of(Quantity<?> quantity) {
+        return KIND.of(quantity);
+    }
+
+    /**
+     * {@return the volume that a text states, such as {@code "12.5 m³"}}
+     *
+     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     */
+    public static Volume parse(String text) {
+        return KIND.parse(text);
+    }
+
+    /** {@return the value in cubic metres} */
+    public double inCubicMetres() {
+        return si();
+    }
+
+    /** {@return the value in litres} */
+    public double inLitres() {
+        return Units.LITRE.fromSi(si());
+    }
+
+    /**
+     * {@return the quotient with a mass}
+     *
+     * @param mass the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public SpecificVolume over(Mass mass) {
+        return SpecificVolume.cubicMetresPerKilogram(si() / mass.si());
+    }
+
+    /**
+     * {@return the quotient with a duration}
+     *
+     * @param duration the divisor, not zero
+     * @throws IllegalArgumentException if the quotient is not finite
+     */
+    public VolumeFlow over(Duration duration) {
+        return VolumeFlow.cubicMetresPerSecond(si() / duration.si());
+    }
+
+    /**
+     * {@return the product with a density}
+     *
+     * @param density the other factor
+     */
+    public Mass times(Density density) {
+        return Mass.kilograms(si() * density.si());
+    }
+
+    @Override
+    public QuantityKind<Volume, Volume> kind() {
+        return KIND;
+    }
+
+    @Override
+    protected Volume with(double si) {
+        return new Volume(si);
+    }
+}

@@ -1,0 +1,62 @@
+package lostwork.plant;
+
+import lostwork.quantity.QuantityKind;
+import lostwork.quantity.ScalarQuantity;
+
+/**
+ * A named physical value of a plant: the temperature at a port, the efficiency of a turbine, the power of a shaft.
+ *
+ * <p>A variable is an identity, the name of its component and a name of its own; its values live in specifications and
+ * solutions. Immutable and thread-safe.
+ *
+ * @param <Q> the quantity of its values
+ */
+public final class Variable<Q extends ScalarQuantity<Q, ?>> {
+    private final String component;
+    private final String name;
+    private final QuantityKind<Q, ?> kind;
+
+    /**
+     * Creates a variable.
+     *
+     * @param component the name of its component
+     * @param name its own name within the component
+     * @param kind the kind of its values
+     */
+    public Variable(String component, String name, QuantityKind<Q, ?> kind) {
+        this.component = component;
+        this.name = name;
+        this.kind = kind;
+    }
+
+    /** {@return the name of its component} */
+    public String component() {
+        return component;
+    }
+
+    /** {@return its own name within the component} */
+    public String name() {
+        return name;
+    }
+
+    /** {@return the kind of its values} */
+    public QuantityKind<Q, ?> kind() {
+        return kind;
+    }
+
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof Variable<?> that && component.equals(that.component) && name.equals(that.name);
+    }
+
+    @Override
+    public int hashCode() {
+        return 31 * component.hashCode() + name.hashCode();
+    }
+
+    /** {@return component and name, such as {@code turbine isentropic efficiency}} */
+    @Override
+    public String toString() {
+        return component + " " + name;
+    }
+}
