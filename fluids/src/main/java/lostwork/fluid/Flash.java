@@ -20,4 +20,44 @@ final class Flash {
     static void pressureEntropy(FluidModel model, double pressure, double entropy, StatePoint out) {
         throw new UnsupportedOperationException("flash engine");
     }
+
+    static void pressureVolume(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void pressureVapourFraction(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void temperatureVapourFraction(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void temperatureEntropy(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void temperatureVolume(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void enthalpyEntropy(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void internalEnergyVolume(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void entropyVolume(FluidModel model, double first, double second, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void saturatedAtTemperature(FluidModel model, double value, PhaseSide side, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
+
+    static void saturatedAtPressure(FluidModel model, double value, PhaseSide side, StatePoint out) {
+        throw new UnsupportedOperationException("flash engine");
+    }
 }

@@ -1,5 +1,7 @@
 package lostwork.fluid;
 
+import org.jspecify.annotations.Nullable;
+
 /**
  * The properties of one state in coherent SI units: what a {@link FluidModel} writes and the hot path reads.
  *
@@ -36,13 +38,48 @@ public final class StatePoint {
     public double volumeByEnthalpy;
     /** (∂v/∂p)<sub>h</sub> in m³/(kg Pa). */
     public double volumeByPressureAtEnthalpy;
-    /** Mass of vapour per total mass, 0 to 1; NaN in a single-phase state. */
+    /** Mass of vapour per total mass, 0 to 1; NaN away from the saturation line and the two-phase region. */
     public double vapourFraction;
+    /** (∂x/∂h)<sub>p</sub> of the vapour fraction in kg/J; NaN in a single-phase state. */
+    public double vapourFractionByEnthalpy;
+    /** (∂x/∂p)<sub>h</sub> of the vapour fraction in 1/Pa; NaN in a single-phase state. */
+    public double vapourFractionByPressureAtEnthalpy;
     /** The phase region. */
     public Phase phase = Phase.GAS;
 
+    private @Nullable StatePoint liquidSide;
+    private @Nullable StatePoint vapourSide;
+
     /** Creates an empty point. */
     public StatePoint() {}
+
+    /**
+     * {@return a work area for saturated liquid, made on the first call and kept}
+     *
+     * <p>After a flash whose result is two-phase it holds the liquid; otherwise its content has no meaning.
+     */
+    public StatePoint liquidSide() {
+        StatePoint side = liquidSide;
+        if (side == null) {
+            side = new StatePoint();
+            liquidSide = side;
+        }
+        return side;
+    }
+
+    /**
+     * {@return a work area for saturated vapour, made on the first call and kept}
+     *
+     * <p>After a flash whose result is two-phase it holds the vapour; otherwise its content has no meaning.
+     */
+    public StatePoint vapourSide() {
+        StatePoint side = vapourSide;
+        if (side == null) {
+            side = new StatePoint();
+            vapourSide = side;
+        }
+        return side;
+    }
 
     /**
      * Fills the point with a single-phase state; the derivatives with pressure and enthalpy follow.
@@ -81,6 +118,8 @@ public final class StatePoint {
         volumeByEnthalpy = volumeByTemperature / heatCapacity;
         volumeByPressureAtEnthalpy = volumeByPressure + volumeByTemperature * temperatureByPressureAtEnthalpy;
         vapourFraction = Double.NaN;
+        vapourFractionByEnthalpy = Double.NaN;
+        vapourFractionByPressureAtEnthalpy = Double.NaN;
         this.phase = phase;
     }
 
@@ -121,6 +160,9 @@ public final class StatePoint {
         final double dhByP = hVapour - hLiquid;
         volumeByPressureAtEnthalpy = vLiquid + x * (dvByP - dv / dh * dhByP) - hLiquid * dv / dh;
         this.vapourFraction = x;
+        // x = (h - h')/(h'' - h')
+        vapourFractionByEnthalpy = 1 / dh;
+        vapourFractionByPressureAtEnthalpy = -(hLiquid + x * dhByP) / dh;
         phase = Phase.TWO_PHASE;
     }
 
@@ -143,6 +185,8 @@ public final class StatePoint {
         volumeByEnthalpy = other.volumeByEnthalpy;
         volumeByPressureAtEnthalpy = other.volumeByPressureAtEnthalpy;
         vapourFraction = other.vapourFraction;
+        vapourFractionByEnthalpy = other.vapourFractionByEnthalpy;
+        vapourFractionByPressureAtEnthalpy = other.vapourFractionByPressureAtEnthalpy;
         phase = other.phase;
     }
 
@@ -151,16 +195,31 @@ public final class StatePoint {
         return enthalpy - pressure * volume;
     }
 
-    /** {@return the isochoric heat capacity in J/(kg K): cv = cp + T (∂v/∂T)²<sub>p</sub>/(∂v/∂p)<sub>T</sub>} */
+    /**
+     * {@return the isochoric heat capacity in J/(kg K)}
+     *
+     * <p>In one phase cv = cp + T (∂v/∂T)²<sub>p</sub>/(∂v/∂p)<sub>T</sub>. In the two-phase region, which stays in
+     * equilibrium, the same (∂u/∂T)<sub>v</sub> comes from the derivatives with pressure and enthalpy.
+     */
     public double isochoricHeatCapacity() {
-        return heatCapacity + temperature * volumeByTemperature * volumeByTemperature / volumeByPressure;
+        if (phase == Phase.TWO_PHASE) {
+            // at constant v: dh = -(v_p/v_h) dp; du = dh - v dp; dT = T_h dh + T_p dp
+            return (volumeByPressureAtEnthalpy + volume * volumeByEnthalpy)
+                    / (temperatureByEnthalpy * volumeByPressureAtEnthalpy
+                            - temperatureByPressureAtEnthalpy * volumeByEnthalpy);
+        }
+        return volumeByTemperature == 0
+                ? heatCapacity
+                : heatCapacity + temperature * volumeByTemperature * volumeByTemperature / volumeByPressure;
     }
 
-    /** {@return the speed of sound in m/s: w² = −v²/(∂v/∂p)<sub>s</sub>} */
+    /**
+     * {@return the speed of sound in m/s: w² = −v²/(∂v/∂p)<sub>s</sub>}
+     *
+     * <p>In the two-phase region it is the one of a mixture that stays in equilibrium, far below those of its phases.
+     */
     public double speedOfSound() {
-        // (∂v/∂p)s = (∂v/∂p)T + T (∂v/∂T)p²/cp
-        final double isentropic =
-                volumeByPressure + temperature * volumeByTemperature * volumeByTemperature / heatCapacity;
-        return volume / Math.sqrt(-isentropic);
+        // (∂v/∂p)s = (∂v/∂p)h + v (∂v/∂h)p, from dh = v dp at constant s
+        return volume / Math.sqrt(-(volumeByPressureAtEnthalpy + volume * volumeByEnthalpy));
     }
 }

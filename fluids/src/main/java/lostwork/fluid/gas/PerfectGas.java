@@ -1,6 +1,5 @@
 package lostwork.fluid.gas;
 
-import java.util.List;
 import lostwork.fluid.Fluid;
 import lostwork.fluid.FluidModel;
 import lostwork.fluid.FluidRange;
@@ -70,8 +69,8 @@ public final class PerfectGas extends Fluid {
 
         @Override
         public Provenance provenance() {
-            return new Provenance(
-                    "perfect gas", List.of("p v = R T, cp constant"), "", "", "h = 0 and s = 0 at 298.15 K and 1 bar");
+            return Provenance.of("perfect gas: p v = R T, constant cp")
+                    .withDatum("h = 0 and s = 0 at 298.15 K and 1 bar");
         }
 
         @Override
