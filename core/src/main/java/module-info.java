@@ -7,4 +7,5 @@ module lostwork.core {
 
     exports lostwork.exergy;
     exports lostwork.quantity;
+    exports lostwork.solve;
 }
