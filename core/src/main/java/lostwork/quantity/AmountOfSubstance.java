@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An amount of substance.
  *
- * <p>SI unit mol. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit mol. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
     public static final QuantityKind<AmountOfSubstance, AmountOfSubstance> KIND = QuantityKind.linear(
             "amount of substance",
             AmountOfSubstance.class,
-            new Dimension(0, 0, 0, 0, 1, 0),
+            Dimension.AMOUNT,
             AmountOfSubstance::new,
             1,
             List.of(Units.MOLE, Units.KILOMOLE));
@@ -24,31 +24,36 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
         super(si, KIND);
     }
 
+    private AmountOfSubstance(double value, Unit<AmountOfSubstance> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return an amount of substance}
+     * {@return an amount of substance in moles}
      *
-     * @param value amount of substance in moles
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of moles
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static AmountOfSubstance moles(double value) {
         return new AmountOfSubstance(value);
     }
 
     /**
-     * {@return an amount of substance}
+     * {@return an amount of substance in kilomoles}
      *
-     * @param value amount of substance in kilomoles
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilomoles
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static AmountOfSubstance kilomoles(double value) {
-        return new AmountOfSubstance(Units.KILOMOLE.toSi(value));
+        return new AmountOfSubstance(value, Units.KILOMOLE);
     }
 
     /**
      * {@return an amount of substance from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static AmountOfSubstance of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +63,8 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
      * {@return the amount of substance that a text states, such as {@code "12.5 mol"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static AmountOfSubstance parse(String text) {
         return KIND.parse(text);
@@ -75,7 +81,7 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
     }
 
     /**
-     * {@return the product with a molar mass}
+     * {@return this amount of substance times a molar mass}
      *
      * @param molarMass the other factor
      */
@@ -84,7 +90,7 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
     }
 
     /**
-     * {@return the product with a molar energy}
+     * {@return this amount of substance times a molar energy}
      *
      * @param molarEnergy the other factor
      */
@@ -93,10 +99,10 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
     }
 
     /**
-     * {@return the quotient with a duration}
+     * {@return this amount of substance divided by a duration}
      *
      * @param duration the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MolarFlow over(Duration duration) {
         return MolarFlow.molesPerSecond(si() / duration.si());

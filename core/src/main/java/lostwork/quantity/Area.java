@@ -6,49 +6,49 @@ import javax.measure.Quantity;
 /**
  * An area.
  *
- * <p>SI unit m². Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m². Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Area extends LinearQuantity<Area> {
     private static final long serialVersionUID = 1L;
 
     /** Name, units, bounds and scale of this quantity. */
     public static final QuantityKind<Area, Area> KIND = QuantityKind.linear(
-            "area",
-            Area.class,
-            new Dimension(2, 0, 0, 0, 0, 0),
-            Area::new,
-            10,
-            List.of(Units.SQUARE_METRE, Units.SQUARE_FOOT));
+            "area", Area.class, Dimension.LENGTH.pow(2), Area::new, 10, List.of(Units.SQUARE_METRE, Units.SQUARE_FOOT));
 
     private Area(double si) {
         super(si, KIND);
     }
 
+    private Area(double value, Unit<Area> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return an area}
+     * {@return an area in square metres}
      *
-     * @param value area in square metres
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of square metres
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Area squareMetres(double value) {
         return new Area(value);
     }
 
     /**
-     * {@return an area}
+     * {@return an area in square feet}
      *
-     * @param value area in square feet
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of square feet
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Area squareFeet(double value) {
-        return new Area(Units.SQUARE_FOOT.toSi(value));
+        return new Area(value, Units.SQUARE_FOOT);
     }
 
     /**
      * {@return an area from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Area of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +58,8 @@ public final class Area extends LinearQuantity<Area> {
      * {@return the area that a text states, such as {@code "12.5 m²"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Area parse(String text) {
         return KIND.parse(text);
@@ -75,7 +76,7 @@ public final class Area extends LinearQuantity<Area> {
     }
 
     /**
-     * {@return the product with a heat flux}
+     * {@return this area times a heat flux}
      *
      * @param heatFlux the other factor
      */
@@ -84,7 +85,7 @@ public final class Area extends LinearQuantity<Area> {
     }
 
     /**
-     * {@return the product with a heat transfer coefficient}
+     * {@return this area times a heat transfer coefficient}
      *
      * @param heatTransferCoefficient the other factor
      */
@@ -93,7 +94,7 @@ public final class Area extends LinearQuantity<Area> {
     }
 
     /**
-     * {@return the product with a speed}
+     * {@return this area times a speed}
      *
      * @param speed the other factor
      */
@@ -102,7 +103,7 @@ public final class Area extends LinearQuantity<Area> {
     }
 
     /**
-     * {@return the product with a length}
+     * {@return this area times a length}
      *
      * @param length the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A heat rate per temperature span: the UA of a heat exchanger.
  *
- * <p>SI unit W/K. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W/K. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Conductance extends LinearQuantity<Conductance> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,10 @@ public final class Conductance extends LinearQuantity<Conductance> {
     public static final QuantityKind<Conductance, Conductance> KIND = QuantityKind.linear(
             "thermal conductance",
             Conductance.class,
-            new Dimension(2, 1, -3, -1, 0, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.TIME.pow(3)),
             Conductance::new,
             1e4,
             List.of(Units.KILOWATT_PER_KELVIN, Units.WATT_PER_KELVIN));
@@ -24,21 +27,25 @@ public final class Conductance extends LinearQuantity<Conductance> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a thermal conductance}
-     *
-     * @param value thermal conductance in kilowatts per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static Conductance kilowattsPerKelvin(double value) {
-        return new Conductance(Units.KILOWATT_PER_KELVIN.toSi(value));
+    private Conductance(double value, Unit<Conductance> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a thermal conductance}
+     * {@return a thermal conductance in kilowatts per kelvin}
      *
-     * @param value thermal conductance in watts per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatts per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static Conductance kilowattsPerKelvin(double value) {
+        return new Conductance(value, Units.KILOWATT_PER_KELVIN);
+    }
+
+    /**
+     * {@return a thermal conductance in watts per kelvin}
+     *
+     * @param value the number of watts per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Conductance wattsPerKelvin(double value) {
         return new Conductance(value);
@@ -48,7 +55,8 @@ public final class Conductance extends LinearQuantity<Conductance> {
      * {@return a thermal conductance from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Conductance of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +66,8 @@ public final class Conductance extends LinearQuantity<Conductance> {
      * {@return the thermal conductance that a text states, such as {@code "12.5 kW/K"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Conductance parse(String text) {
         return KIND.parse(text);
@@ -75,7 +84,7 @@ public final class Conductance extends LinearQuantity<Conductance> {
     }
 
     /**
-     * {@return the product with a temperature span}
+     * {@return this thermal conductance times a temperature span}
      *
      * @param temperatureSpan the other factor
      */
@@ -84,20 +93,20 @@ public final class Conductance extends LinearQuantity<Conductance> {
     }
 
     /**
-     * {@return the quotient with an area}
+     * {@return this thermal conductance divided by an area}
      *
      * @param area the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public HeatTransferCoefficient over(Area area) {
         return HeatTransferCoefficient.wattsPerSquareMetreKelvin(si() / area.si());
     }
 
     /**
-     * {@return the quotient with a heat transfer coefficient}
+     * {@return this thermal conductance divided by a heat transfer coefficient}
      *
      * @param heatTransferCoefficient the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public Area over(HeatTransferCoefficient heatTransferCoefficient) {
         return Area.squareMetres(si() / heatTransferCoefficient.si());

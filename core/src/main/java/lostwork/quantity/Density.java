@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A mass per volume.
  *
- * <p>SI unit kg/m³. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit kg/m³. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Density extends LinearQuantity<Density> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class Density extends LinearQuantity<Density> {
     public static final QuantityKind<Density, Density> KIND = QuantityKind.linear(
             "density",
             Density.class,
-            new Dimension(-3, 1, 0, 0, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.LENGTH.pow(3)),
             Density::new,
             1,
             List.of(Units.KILOGRAM_PER_CUBIC_METRE, Units.GRAM_PER_CUBIC_CENTIMETRE, Units.POUND_PER_CUBIC_FOOT));
@@ -24,41 +24,46 @@ public final class Density extends LinearQuantity<Density> {
         super(si, KIND);
     }
 
+    private Density(double value, Unit<Density> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a density}
+     * {@return a density in kilograms per cubic metre}
      *
-     * @param value density in kilograms per cubic metre
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms per cubic metre
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Density kilogramsPerCubicMetre(double value) {
         return new Density(value);
     }
 
     /**
-     * {@return a density}
+     * {@return a density in grams per cubic centimetre}
      *
-     * @param value density in grams per cubic centimetre
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of grams per cubic centimetre
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Density gramsPerCubicCentimetre(double value) {
-        return new Density(Units.GRAM_PER_CUBIC_CENTIMETRE.toSi(value));
+        return new Density(value, Units.GRAM_PER_CUBIC_CENTIMETRE);
     }
 
     /**
-     * {@return a density}
+     * {@return a density in pounds per cubic foot}
      *
-     * @param value density in pounds per cubic foot
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of pounds per cubic foot
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Density poundsPerCubicFoot(double value) {
-        return new Density(Units.POUND_PER_CUBIC_FOOT.toSi(value));
+        return new Density(value, Units.POUND_PER_CUBIC_FOOT);
     }
 
     /**
      * {@return a density from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Density of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class Density extends LinearQuantity<Density> {
      * {@return the density that a text states, such as {@code "12.5 kg/m³"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Density parse(String text) {
         return KIND.parse(text);
@@ -90,7 +96,7 @@ public final class Density extends LinearQuantity<Density> {
     }
 
     /**
-     * {@return the product with a volume}
+     * {@return this density times a volume}
      *
      * @param volume the other factor
      */
@@ -99,7 +105,7 @@ public final class Density extends LinearQuantity<Density> {
     }
 
     /**
-     * {@return the product with a volume flow}
+     * {@return this density times a volume flow}
      *
      * @param volumeFlow the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A length of time, such as the hours a year that a stream flows.
  *
- * <p>SI unit s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Duration extends LinearQuantity<Duration> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class Duration extends LinearQuantity<Duration> {
     public static final QuantityKind<Duration, Duration> KIND = QuantityKind.linear(
             "duration",
             Duration.class,
-            new Dimension(0, 0, 1, 0, 0, 0),
+            Dimension.TIME,
             Duration::new,
             3600,
             List.of(Units.HOUR, Units.SECOND, Units.MINUTE, Units.DAY, Units.YEAR));
@@ -24,61 +24,66 @@ public final class Duration extends LinearQuantity<Duration> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a duration}
-     *
-     * @param value duration in hours
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static Duration hours(double value) {
-        return new Duration(Units.HOUR.toSi(value));
+    private Duration(double value, Unit<Duration> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a duration}
+     * {@return a duration in hours}
      *
-     * @param value duration in seconds
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of hours
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static Duration hours(double value) {
+        return new Duration(value, Units.HOUR);
+    }
+
+    /**
+     * {@return a duration in seconds}
+     *
+     * @param value the number of seconds
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Duration seconds(double value) {
         return new Duration(value);
     }
 
     /**
-     * {@return a duration}
+     * {@return a duration in minutes}
      *
-     * @param value duration in minutes
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of minutes
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Duration minutes(double value) {
-        return new Duration(Units.MINUTE.toSi(value));
+        return new Duration(value, Units.MINUTE);
     }
 
     /**
-     * {@return a duration}
+     * {@return a duration in days}
      *
-     * @param value duration in days
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of days
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Duration days(double value) {
-        return new Duration(Units.DAY.toSi(value));
+        return new Duration(value, Units.DAY);
     }
 
     /**
-     * {@return a duration}
+     * {@return a duration in years of 8760 hours}
      *
-     * @param value duration in years of 8760 hours
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of years of 8760 hours
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Duration years(double value) {
-        return new Duration(Units.YEAR.toSi(value));
+        return new Duration(value, Units.YEAR);
     }
 
     /**
      * {@return a duration from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Duration of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -88,7 +93,8 @@ public final class Duration extends LinearQuantity<Duration> {
      * {@return the duration that a text states, such as {@code "12.5 h"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Duration parse(String text) {
         return KIND.parse(text);
@@ -120,7 +126,7 @@ public final class Duration extends LinearQuantity<Duration> {
     }
 
     /**
-     * {@return the product with a power}
+     * {@return this duration times a power}
      *
      * @param power the other factor
      */
@@ -129,7 +135,7 @@ public final class Duration extends LinearQuantity<Duration> {
     }
 
     /**
-     * {@return the product with a mass flow}
+     * {@return this duration times a mass flow}
      *
      * @param massFlow the other factor
      */
@@ -138,7 +144,7 @@ public final class Duration extends LinearQuantity<Duration> {
     }
 
     /**
-     * {@return the product with a money rate}
+     * {@return this duration times a money rate}
      *
      * @param moneyRate the other factor
      */
@@ -147,7 +153,7 @@ public final class Duration extends LinearQuantity<Duration> {
     }
 
     /**
-     * {@return the product with a volume flow}
+     * {@return this duration times a volume flow}
      *
      * @param volumeFlow the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A shear stress per velocity gradient.
  *
- * <p>SI unit Pa s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit Pa s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class DynamicViscosity extends LinearQuantity<DynamicViscosity> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class DynamicViscosity extends LinearQuantity<DynamicViscosity> {
     public static final QuantityKind<DynamicViscosity, DynamicViscosity> KIND = QuantityKind.linear(
             "dynamic viscosity",
             DynamicViscosity.class,
-            new Dimension(-1, 1, -1, 0, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.LENGTH).dividedBy(Dimension.TIME),
             DynamicViscosity::new,
             1e-5,
             List.of(Units.MICROPASCAL_SECOND, Units.PASCAL_SECOND, Units.MILLIPASCAL_SECOND));
@@ -24,41 +24,46 @@ public final class DynamicViscosity extends LinearQuantity<DynamicViscosity> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a dynamic viscosity}
-     *
-     * @param value dynamic viscosity in micropascal seconds
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static DynamicViscosity micropascalSeconds(double value) {
-        return new DynamicViscosity(Units.MICROPASCAL_SECOND.toSi(value));
+    private DynamicViscosity(double value, Unit<DynamicViscosity> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a dynamic viscosity}
+     * {@return a dynamic viscosity in micropascal seconds}
      *
-     * @param value dynamic viscosity in pascal seconds
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of micropascal seconds
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static DynamicViscosity micropascalSeconds(double value) {
+        return new DynamicViscosity(value, Units.MICROPASCAL_SECOND);
+    }
+
+    /**
+     * {@return a dynamic viscosity in pascal seconds}
+     *
+     * @param value the number of pascal seconds
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static DynamicViscosity pascalSeconds(double value) {
         return new DynamicViscosity(value);
     }
 
     /**
-     * {@return a dynamic viscosity}
+     * {@return a dynamic viscosity in millipascal seconds}
      *
-     * @param value dynamic viscosity in millipascal seconds
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of millipascal seconds
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static DynamicViscosity millipascalSeconds(double value) {
-        return new DynamicViscosity(Units.MILLIPASCAL_SECOND.toSi(value));
+        return new DynamicViscosity(value, Units.MILLIPASCAL_SECOND);
     }
 
     /**
      * {@return a dynamic viscosity from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static DynamicViscosity of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class DynamicViscosity extends LinearQuantity<DynamicViscosity> {
      * {@return the dynamic viscosity that a text states, such as {@code "12.5 µPa s"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static DynamicViscosity parse(String text) {
         return KIND.parse(text);

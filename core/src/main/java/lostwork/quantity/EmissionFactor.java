@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * Mass of carbon dioxide per energy: the carbon intensity of a grid, the emission factor of a fuel.
  *
- * <p>SI unit kg/J. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit kg/J. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
     public static final QuantityKind<EmissionFactor, EmissionFactor> KIND = QuantityKind.linear(
             "emission factor",
             EmissionFactor.class,
-            new Dimension(-2, 0, 2, 0, 0, 0),
+            Dimension.TIME.pow(2).dividedBy(Dimension.LENGTH.pow(2)),
             EmissionFactor::new,
             1e-7,
             List.of(Units.KILOGRAM_PER_MEGAWATT_HOUR, Units.KILOGRAM_PER_GIGAJOULE, Units.KILOGRAM_PER_JOULE));
@@ -24,31 +24,35 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
         super(si, KIND);
     }
 
+    private EmissionFactor(double value, Unit<EmissionFactor> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return an emission factor}
+     * {@return an emission factor in kilograms per megawatt hour}
      *
-     * @param value emission factor in kilograms per megawatt hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms per megawatt hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EmissionFactor kilogramsPerMegawattHour(double value) {
-        return new EmissionFactor(Units.KILOGRAM_PER_MEGAWATT_HOUR.toSi(value));
+        return new EmissionFactor(value, Units.KILOGRAM_PER_MEGAWATT_HOUR);
     }
 
     /**
-     * {@return an emission factor}
+     * {@return an emission factor in kilograms per gigajoule}
      *
-     * @param value emission factor in kilograms per gigajoule
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms per gigajoule
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EmissionFactor kilogramsPerGigajoule(double value) {
-        return new EmissionFactor(Units.KILOGRAM_PER_GIGAJOULE.toSi(value));
+        return new EmissionFactor(value, Units.KILOGRAM_PER_GIGAJOULE);
     }
 
     /**
-     * {@return an emission factor}
+     * {@return an emission factor in kilograms per joule}
      *
-     * @param value emission factor in kilograms per joule
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms per joule
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EmissionFactor kilogramsPerJoule(double value) {
         return new EmissionFactor(value);
@@ -58,7 +62,8 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
      * {@return an emission factor from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static EmissionFactor of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
      * {@return the emission factor that a text states, such as {@code "12.5 kg/MWh"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static EmissionFactor parse(String text) {
         return KIND.parse(text);
@@ -90,7 +96,7 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
     }
 
     /**
-     * {@return the product with an energy}
+     * {@return this emission factor times an energy}
      *
      * @param energy the other factor
      */
@@ -99,7 +105,7 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
     }
 
     /**
-     * {@return the product with a power}
+     * {@return this emission factor times a power}
      *
      * @param power the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An energy: heat, work, exergy.
  *
- * <p>SI unit J. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Energy extends LinearQuantity<Energy> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class Energy extends LinearQuantity<Energy> {
     public static final QuantityKind<Energy, Energy> KIND = QuantityKind.linear(
             "energy",
             Energy.class,
-            new Dimension(2, 1, -2, 0, 0, 0),
+            Dimension.MASS.times(Dimension.LENGTH.pow(2)).dividedBy(Dimension.TIME.pow(2)),
             Energy::new,
             1e6,
             List.of(
@@ -32,91 +32,96 @@ public final class Energy extends LinearQuantity<Energy> {
         super(si, KIND);
     }
 
-    /**
-     * {@return an energy}
-     *
-     * @param value energy in kilojoules
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static Energy kilojoules(double value) {
-        return new Energy(Units.KILOJOULE.toSi(value));
+    private Energy(double value, Unit<Energy> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in kilojoules}
      *
-     * @param value energy in joules
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static Energy kilojoules(double value) {
+        return new Energy(value, Units.KILOJOULE);
+    }
+
+    /**
+     * {@return an energy in joules}
+     *
+     * @param value the number of joules
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy joules(double value) {
         return new Energy(value);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in megajoules}
      *
-     * @param value energy in megajoules
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of megajoules
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy megajoules(double value) {
-        return new Energy(Units.MEGAJOULE.toSi(value));
+        return new Energy(value, Units.MEGAJOULE);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in gigajoules}
      *
-     * @param value energy in gigajoules
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of gigajoules
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy gigajoules(double value) {
-        return new Energy(Units.GIGAJOULE.toSi(value));
+        return new Energy(value, Units.GIGAJOULE);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in kilowatt hours}
      *
-     * @param value energy in kilowatt hours
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatt hours
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy kilowattHours(double value) {
-        return new Energy(Units.KILOWATT_HOUR.toSi(value));
+        return new Energy(value, Units.KILOWATT_HOUR);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in megawatt hours}
      *
-     * @param value energy in megawatt hours
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of megawatt hours
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy megawattHours(double value) {
-        return new Energy(Units.MEGAWATT_HOUR.toSi(value));
+        return new Energy(value, Units.MEGAWATT_HOUR);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in gigawatt hours}
      *
-     * @param value energy in gigawatt hours
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of gigawatt hours
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy gigawattHours(double value) {
-        return new Energy(Units.GIGAWATT_HOUR.toSi(value));
+        return new Energy(value, Units.GIGAWATT_HOUR);
     }
 
     /**
-     * {@return an energy}
+     * {@return an energy in British thermal units (International Table)}
      *
-     * @param value energy in British thermal units (International Table)
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of British thermal units (International Table)
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Energy btu(double value) {
-        return new Energy(Units.BTU.toSi(value));
+        return new Energy(value, Units.BTU);
     }
 
     /**
      * {@return an energy from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Energy of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -126,7 +131,8 @@ public final class Energy extends LinearQuantity<Energy> {
      * {@return the energy that a text states, such as {@code "12.5 kJ"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Energy parse(String text) {
         return KIND.parse(text);
@@ -173,37 +179,37 @@ public final class Energy extends LinearQuantity<Energy> {
     }
 
     /**
-     * {@return the quotient with a duration}
+     * {@return this energy divided by a duration}
      *
      * @param duration the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public Power over(Duration duration) {
         return Power.watts(si() / duration.si());
     }
 
     /**
-     * {@return the quotient with a mass}
+     * {@return this energy divided by a mass}
      *
      * @param mass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificEnergy over(Mass mass) {
         return SpecificEnergy.joulesPerKilogram(si() / mass.si());
     }
 
     /**
-     * {@return the quotient with an amount of substance}
+     * {@return this energy divided by an amount of substance}
      *
      * @param amountOfSubstance the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MolarEnergy over(AmountOfSubstance amountOfSubstance) {
         return MolarEnergy.joulesPerMole(si() / amountOfSubstance.si());
     }
 
     /**
-     * {@return the product with an energy price}
+     * {@return this energy times an energy price}
      *
      * @param energyPrice the other factor
      */
@@ -212,7 +218,7 @@ public final class Energy extends LinearQuantity<Energy> {
     }
 
     /**
-     * {@return the product with an emission factor}
+     * {@return this energy times an emission factor}
      *
      * @param emissionFactor the other factor
      */

@@ -1,12 +1,11 @@
 package lostwork.quantity;
 
 import java.util.List;
-import javax.measure.Quantity;
 
 /**
  * Money per energy.
  *
- * <p>SI unit ¤/J. Any finite value exists. Immutable and thread-safe.
+ * <p>Coherent unit ¤/J. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class EnergyPrice extends LinearQuantity<EnergyPrice> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +14,10 @@ public final class EnergyPrice extends LinearQuantity<EnergyPrice> {
     public static final QuantityKind<EnergyPrice, EnergyPrice> KIND = QuantityKind.linear(
             "energy price",
             EnergyPrice.class,
-            new Dimension(-2, -1, 2, 0, 0, 1),
+            Dimension.MONEY
+                    .times(Dimension.TIME.pow(2))
+                    .dividedBy(Dimension.MASS)
+                    .dividedBy(Dimension.LENGTH.pow(2)),
             EnergyPrice::new,
             1e-8,
             List.of(
@@ -28,61 +30,56 @@ public final class EnergyPrice extends LinearQuantity<EnergyPrice> {
         super(si, KIND);
     }
 
+    private EnergyPrice(double value, Unit<EnergyPrice> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return an energy price}
+     * {@return an energy price in units of the currency per megawatt hour}
      *
-     * @param value energy price in units of the currency per megawatt hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per megawatt hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EnergyPrice perMegawattHour(double value) {
-        return new EnergyPrice(Units.CURRENCY_PER_MEGAWATT_HOUR.toSi(value));
+        return new EnergyPrice(value, Units.CURRENCY_PER_MEGAWATT_HOUR);
     }
 
     /**
-     * {@return an energy price}
+     * {@return an energy price in units of the currency per kilowatt hour}
      *
-     * @param value energy price in units of the currency per kilowatt hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per kilowatt hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EnergyPrice perKilowattHour(double value) {
-        return new EnergyPrice(Units.CURRENCY_PER_KILOWATT_HOUR.toSi(value));
+        return new EnergyPrice(value, Units.CURRENCY_PER_KILOWATT_HOUR);
     }
 
     /**
-     * {@return an energy price}
+     * {@return an energy price in units of the currency per gigajoule}
      *
-     * @param value energy price in units of the currency per gigajoule
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per gigajoule
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EnergyPrice perGigajoule(double value) {
-        return new EnergyPrice(Units.CURRENCY_PER_GIGAJOULE.toSi(value));
+        return new EnergyPrice(value, Units.CURRENCY_PER_GIGAJOULE);
     }
 
     /**
-     * {@return an energy price}
+     * {@return an energy price in units of the currency per joule}
      *
-     * @param value energy price in units of the currency per joule
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per joule
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EnergyPrice perJoule(double value) {
         return new EnergyPrice(value);
     }
 
     /**
-     * {@return an energy price from a JSR-385 quantity in any unit of the same dimension}
-     *
-     * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
-     */
-    public static EnergyPrice of(Quantity<?> quantity) {
-        return KIND.of(quantity);
-    }
-
-    /**
      * {@return the energy price that a text states, such as {@code "12.5 ¤/MWh"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static EnergyPrice parse(String text) {
         return KIND.parse(text);
@@ -109,7 +106,7 @@ public final class EnergyPrice extends LinearQuantity<EnergyPrice> {
     }
 
     /**
-     * {@return the product with an energy}
+     * {@return this energy price times an energy}
      *
      * @param energy the other factor
      */
@@ -118,7 +115,7 @@ public final class EnergyPrice extends LinearQuantity<EnergyPrice> {
     }
 
     /**
-     * {@return the product with a power}
+     * {@return this energy price times a power}
      *
      * @param power the other factor
      */

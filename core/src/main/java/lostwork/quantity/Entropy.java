@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An entropy.
  *
- * <p>SI unit J/K. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/K. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Entropy extends LinearQuantity<Entropy> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,10 @@ public final class Entropy extends LinearQuantity<Entropy> {
     public static final QuantityKind<Entropy, Entropy> KIND = QuantityKind.linear(
             "entropy",
             Entropy.class,
-            new Dimension(2, 1, -2, -1, 0, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.TIME.pow(2)),
             Entropy::new,
             1e3,
             List.of(Units.KILOJOULE_PER_KELVIN, Units.JOULE_PER_KELVIN));
@@ -24,21 +27,25 @@ public final class Entropy extends LinearQuantity<Entropy> {
         super(si, KIND);
     }
 
-    /**
-     * {@return an entropy}
-     *
-     * @param value entropy in kilojoules per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static Entropy kilojoulesPerKelvin(double value) {
-        return new Entropy(Units.KILOJOULE_PER_KELVIN.toSi(value));
+    private Entropy(double value, Unit<Entropy> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return an entropy}
+     * {@return an entropy in kilojoules per kelvin}
      *
-     * @param value entropy in joules per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static Entropy kilojoulesPerKelvin(double value) {
+        return new Entropy(value, Units.KILOJOULE_PER_KELVIN);
+    }
+
+    /**
+     * {@return an entropy in joules per kelvin}
+     *
+     * @param value the number of joules per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Entropy joulesPerKelvin(double value) {
         return new Entropy(value);
@@ -48,7 +55,8 @@ public final class Entropy extends LinearQuantity<Entropy> {
      * {@return an entropy from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Entropy of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +66,8 @@ public final class Entropy extends LinearQuantity<Entropy> {
      * {@return the entropy that a text states, such as {@code "12.5 kJ/K"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Entropy parse(String text) {
         return KIND.parse(text);
@@ -75,7 +84,7 @@ public final class Entropy extends LinearQuantity<Entropy> {
     }
 
     /**
-     * {@return the product with a temperature}
+     * {@return this entropy times a temperature}
      *
      * @param temperature the other factor
      */
@@ -84,20 +93,20 @@ public final class Entropy extends LinearQuantity<Entropy> {
     }
 
     /**
-     * {@return the quotient with a duration}
+     * {@return this entropy divided by a duration}
      *
      * @param duration the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public EntropyRate over(Duration duration) {
         return EntropyRate.wattsPerKelvin(si() / duration.si());
     }
 
     /**
-     * {@return the quotient with a mass}
+     * {@return this entropy divided by a mass}
      *
      * @param mass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificEntropy over(Mass mass) {
         return SpecificEntropy.joulesPerKilogramKelvin(si() / mass.si());

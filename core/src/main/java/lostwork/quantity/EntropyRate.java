@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An entropy per time: entropy flow or entropy generation.
  *
- * <p>SI unit W/K. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W/K. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class EntropyRate extends LinearQuantity<EntropyRate> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,10 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
     public static final QuantityKind<EntropyRate, EntropyRate> KIND = QuantityKind.linear(
             "entropy rate",
             EntropyRate.class,
-            new Dimension(2, 1, -3, -1, 0, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.TIME.pow(3)),
             EntropyRate::new,
             1e3,
             List.of(Units.KILOWATT_PER_KELVIN_ENTROPY, Units.WATT_PER_KELVIN_ENTROPY));
@@ -24,21 +27,25 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
         super(si, KIND);
     }
 
-    /**
-     * {@return an entropy rate}
-     *
-     * @param value entropy rate in kilowatts per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static EntropyRate kilowattsPerKelvin(double value) {
-        return new EntropyRate(Units.KILOWATT_PER_KELVIN_ENTROPY.toSi(value));
+    private EntropyRate(double value, Unit<EntropyRate> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return an entropy rate}
+     * {@return an entropy rate in kilowatts per kelvin}
      *
-     * @param value entropy rate in watts per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatts per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static EntropyRate kilowattsPerKelvin(double value) {
+        return new EntropyRate(value, Units.KILOWATT_PER_KELVIN_ENTROPY);
+    }
+
+    /**
+     * {@return an entropy rate in watts per kelvin}
+     *
+     * @param value the number of watts per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static EntropyRate wattsPerKelvin(double value) {
         return new EntropyRate(value);
@@ -48,7 +55,8 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
      * {@return an entropy rate from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static EntropyRate of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +66,8 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
      * {@return the entropy rate that a text states, such as {@code "12.5 kW/K"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static EntropyRate parse(String text) {
         return KIND.parse(text);
@@ -75,7 +84,7 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
     }
 
     /**
-     * {@return the product with a temperature}
+     * {@return this entropy rate times a temperature}
      *
      * @param temperature the other factor
      */
@@ -84,7 +93,7 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
     }
 
     /**
-     * {@return the product with a duration}
+     * {@return this entropy rate times a duration}
      *
      * @param duration the other factor
      */
@@ -93,10 +102,10 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
     }
 
     /**
-     * {@return the quotient with a mass flow}
+     * {@return this entropy rate divided by a mass flow}
      *
      * @param massFlow the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificEntropy over(MassFlow massFlow) {
         return SpecificEntropy.joulesPerKilogramKelvin(si() / massFlow.si());

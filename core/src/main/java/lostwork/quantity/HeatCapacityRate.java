@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A mass flow times its specific heat capacity.
  *
- * <p>SI unit W/K. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W/K. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,10 @@ public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
     public static final QuantityKind<HeatCapacityRate, HeatCapacityRate> KIND = QuantityKind.linear(
             "heat capacity rate",
             HeatCapacityRate.class,
-            new Dimension(2, 1, -3, -1, 0, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.TIME.pow(3)),
             HeatCapacityRate::new,
             1e3,
             List.of(Units.KILOWATT_PER_KELVIN_CAPACITY, Units.WATT_PER_KELVIN_CAPACITY));
@@ -24,21 +27,25 @@ public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a heat capacity rate}
-     *
-     * @param value heat capacity rate in kilowatts per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static HeatCapacityRate kilowattsPerKelvin(double value) {
-        return new HeatCapacityRate(Units.KILOWATT_PER_KELVIN_CAPACITY.toSi(value));
+    private HeatCapacityRate(double value, Unit<HeatCapacityRate> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a heat capacity rate}
+     * {@return a heat capacity rate in kilowatts per kelvin}
      *
-     * @param value heat capacity rate in watts per kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatts per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static HeatCapacityRate kilowattsPerKelvin(double value) {
+        return new HeatCapacityRate(value, Units.KILOWATT_PER_KELVIN_CAPACITY);
+    }
+
+    /**
+     * {@return a heat capacity rate in watts per kelvin}
+     *
+     * @param value the number of watts per kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static HeatCapacityRate wattsPerKelvin(double value) {
         return new HeatCapacityRate(value);
@@ -48,7 +55,8 @@ public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
      * {@return a heat capacity rate from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static HeatCapacityRate of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +66,8 @@ public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
      * {@return the heat capacity rate that a text states, such as {@code "12.5 kW/K"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static HeatCapacityRate parse(String text) {
         return KIND.parse(text);
@@ -75,7 +84,7 @@ public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
     }
 
     /**
-     * {@return the product with a temperature span}
+     * {@return this heat capacity rate times a temperature span}
      *
      * @param temperatureSpan the other factor
      */

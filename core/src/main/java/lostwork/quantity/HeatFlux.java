@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A heat rate per area.
  *
- * <p>SI unit W/m². Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W/m². Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class HeatFlux extends LinearQuantity<HeatFlux> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
     public static final QuantityKind<HeatFlux, HeatFlux> KIND = QuantityKind.linear(
             "heat flux",
             HeatFlux.class,
-            new Dimension(0, 1, -3, 0, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.TIME.pow(3)),
             HeatFlux::new,
             1e4,
             List.of(Units.KILOWATT_PER_SQUARE_METRE, Units.WATT_PER_SQUARE_METRE));
@@ -24,21 +24,25 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a heat flux}
-     *
-     * @param value heat flux in kilowatts per square metre
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static HeatFlux kilowattsPerSquareMetre(double value) {
-        return new HeatFlux(Units.KILOWATT_PER_SQUARE_METRE.toSi(value));
+    private HeatFlux(double value, Unit<HeatFlux> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a heat flux}
+     * {@return a heat flux in kilowatts per square metre}
      *
-     * @param value heat flux in watts per square metre
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatts per square metre
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static HeatFlux kilowattsPerSquareMetre(double value) {
+        return new HeatFlux(value, Units.KILOWATT_PER_SQUARE_METRE);
+    }
+
+    /**
+     * {@return a heat flux in watts per square metre}
+     *
+     * @param value the number of watts per square metre
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static HeatFlux wattsPerSquareMetre(double value) {
         return new HeatFlux(value);
@@ -48,7 +52,8 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
      * {@return a heat flux from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static HeatFlux of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +63,8 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
      * {@return the heat flux that a text states, such as {@code "12.5 kW/m²"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static HeatFlux parse(String text) {
         return KIND.parse(text);
@@ -75,7 +81,7 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
     }
 
     /**
-     * {@return the product with an area}
+     * {@return this heat flux times an area}
      *
      * @param area the other factor
      */
@@ -84,10 +90,10 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
     }
 
     /**
-     * {@return the quotient with a temperature span}
+     * {@return this heat flux divided by a temperature span}
      *
      * @param temperatureSpan the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public HeatTransferCoefficient over(TemperatureSpan temperatureSpan) {
         return HeatTransferCoefficient.wattsPerSquareMetreKelvin(si() / temperatureSpan.si());

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A heat flux per temperature span.
  *
- * <p>SI unit W/(m² K). Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W/(m² K). Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCoefficient> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
     public static final QuantityKind<HeatTransferCoefficient, HeatTransferCoefficient> KIND = QuantityKind.linear(
             "heat transfer coefficient",
             HeatTransferCoefficient.class,
-            new Dimension(0, 1, -3, -1, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.TEMPERATURE).dividedBy(Dimension.TIME.pow(3)),
             HeatTransferCoefficient::new,
             100,
             List.of(Units.WATT_PER_SQUARE_METRE_KELVIN));
@@ -24,11 +24,15 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
         super(si, KIND);
     }
 
+    private HeatTransferCoefficient(double value, Unit<HeatTransferCoefficient> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a heat transfer coefficient}
+     * {@return a heat transfer coefficient in watts per square metre and kelvin}
      *
-     * @param value heat transfer coefficient in watts per square metre and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of watts per square metre and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static HeatTransferCoefficient wattsPerSquareMetreKelvin(double value) {
         return new HeatTransferCoefficient(value);
@@ -38,7 +42,8 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
      * {@return a heat transfer coefficient from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static HeatTransferCoefficient of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -48,7 +53,8 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
      * {@return the heat transfer coefficient that a text states, such as {@code "12.5 W/(m² K)"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static HeatTransferCoefficient parse(String text) {
         return KIND.parse(text);
@@ -60,7 +66,7 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
     }
 
     /**
-     * {@return the product with an area}
+     * {@return this heat transfer coefficient times an area}
      *
      * @param area the other factor
      */
@@ -69,7 +75,7 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
     }
 
     /**
-     * {@return the product with a temperature span}
+     * {@return this heat transfer coefficient times a temperature span}
      *
      * @param temperatureSpan the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A length.
  *
- * <p>SI unit m. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Length extends LinearQuantity<Length> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class Length extends LinearQuantity<Length> {
     public static final QuantityKind<Length, Length> KIND = QuantityKind.linear(
             "length",
             Length.class,
-            new Dimension(1, 0, 0, 0, 0, 0),
+            Dimension.LENGTH,
             Length::new,
             1,
             List.of(Units.METRE, Units.MILLIMETRE, Units.FOOT, Units.INCH));
@@ -24,51 +24,56 @@ public final class Length extends LinearQuantity<Length> {
         super(si, KIND);
     }
 
+    private Length(double value, Unit<Length> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a length}
+     * {@return a length in metres}
      *
-     * @param value length in metres
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of metres
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Length metres(double value) {
         return new Length(value);
     }
 
     /**
-     * {@return a length}
+     * {@return a length in millimetres}
      *
-     * @param value length in millimetres
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of millimetres
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Length millimetres(double value) {
-        return new Length(Units.MILLIMETRE.toSi(value));
+        return new Length(value, Units.MILLIMETRE);
     }
 
     /**
-     * {@return a length}
+     * {@return a length in feet}
      *
-     * @param value length in feet
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of feet
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Length feet(double value) {
-        return new Length(Units.FOOT.toSi(value));
+        return new Length(value, Units.FOOT);
     }
 
     /**
-     * {@return a length}
+     * {@return a length in inches}
      *
-     * @param value length in inches
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of inches
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Length inches(double value) {
-        return new Length(Units.INCH.toSi(value));
+        return new Length(value, Units.INCH);
     }
 
     /**
      * {@return a length from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Length of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -78,7 +83,8 @@ public final class Length extends LinearQuantity<Length> {
      * {@return the length that a text states, such as {@code "12.5 m"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Length parse(String text) {
         return KIND.parse(text);
@@ -105,7 +111,7 @@ public final class Length extends LinearQuantity<Length> {
     }
 
     /**
-     * {@return the product with a length}
+     * {@return this length times a length}
      *
      * @param length the other factor
      */

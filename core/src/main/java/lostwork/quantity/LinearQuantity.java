@@ -16,10 +16,22 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      *
      * @param si the value in the coherent SI unit
      * @param kind the kind, which sets the bounds
-     * @throws IllegalArgumentException if the value is NaN, infinite or outside the bounds of the kind
+     * @throws OutOfRangeException if the value is NaN, infinite or outside the bounds of the kind
      */
     protected LinearQuantity(double si, QuantityKind<Q, Q> kind) {
         super(si, kind);
+    }
+
+    /**
+     * Checks and stores a value that is given in a unit; a refusal is worded in that unit.
+     *
+     * @param value the value in the unit
+     * @param unit the unit
+     * @param kind the kind, which sets the bounds
+     * @throws OutOfRangeException if the value is NaN, infinite or outside the bounds of the kind
+     */
+    protected LinearQuantity(double value, Unit<Q> unit, QuantityKind<Q, Q> kind) {
+        super(value, unit, kind);
     }
 
     /**
@@ -33,6 +45,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * {@return the sum of this value and another}
      *
      * @param other what is added
+     * @throws OutOfRangeException if the result is not finite
      */
     public final Q plus(Q other) {
         return with(si() + other.si());
@@ -42,6 +55,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * {@return this value less another}
      *
      * @param other what is taken away
+     * @throws OutOfRangeException if the result is not finite
      */
     public final Q minus(Q other) {
         return with(si() - other.si());
@@ -51,6 +65,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * {@return this value times a number}
      *
      * @param factor the number
+     * @throws OutOfRangeException if the result is not finite
      */
     public final Q times(double factor) {
         return with(si() * factor);
@@ -60,6 +75,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * {@return this value times a ratio}
      *
      * @param factor the ratio
+     * @throws OutOfRangeException if the result is not finite
      */
     public final Q times(Ratio factor) {
         return with(si() * factor.si());
@@ -69,7 +85,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * {@return this value divided by a number}
      *
      * @param divisor the number, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the quotient is not finite
      */
     public final Q dividedBy(double divisor) {
         return with(si() / divisor);
@@ -79,7 +95,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * {@return how many times another value of the same kind goes into this one}
      *
      * @param other the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the quotient is not finite
      */
     public final Ratio over(Q other) {
         return Ratio.fraction(si() / other.si());

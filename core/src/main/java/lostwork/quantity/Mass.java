@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A mass.
  *
- * <p>SI unit kg. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit kg. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Mass extends LinearQuantity<Mass> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class Mass extends LinearQuantity<Mass> {
     public static final QuantityKind<Mass, Mass> KIND = QuantityKind.linear(
             "mass",
             Mass.class,
-            new Dimension(0, 1, 0, 0, 0, 0),
+            Dimension.MASS,
             Mass::new,
             1,
             List.of(Units.KILOGRAM, Units.GRAM, Units.TONNE, Units.POUND));
@@ -24,51 +24,56 @@ public final class Mass extends LinearQuantity<Mass> {
         super(si, KIND);
     }
 
+    private Mass(double value, Unit<Mass> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a mass}
+     * {@return a mass in kilograms}
      *
-     * @param value mass in kilograms
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Mass kilograms(double value) {
         return new Mass(value);
     }
 
     /**
-     * {@return a mass}
+     * {@return a mass in grams}
      *
-     * @param value mass in grams
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of grams
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Mass grams(double value) {
-        return new Mass(Units.GRAM.toSi(value));
+        return new Mass(value, Units.GRAM);
     }
 
     /**
-     * {@return a mass}
+     * {@return a mass in tonnes}
      *
-     * @param value mass in tonnes
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of tonnes
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Mass tonnes(double value) {
-        return new Mass(Units.TONNE.toSi(value));
+        return new Mass(value, Units.TONNE);
     }
 
     /**
-     * {@return a mass}
+     * {@return a mass in pounds (avoirdupois)}
      *
-     * @param value mass in pounds (avoirdupois)
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of pounds (avoirdupois)
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Mass pounds(double value) {
-        return new Mass(Units.POUND.toSi(value));
+        return new Mass(value, Units.POUND);
     }
 
     /**
      * {@return a mass from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Mass of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -78,7 +83,8 @@ public final class Mass extends LinearQuantity<Mass> {
      * {@return the mass that a text states, such as {@code "12.5 kg"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Mass parse(String text) {
         return KIND.parse(text);
@@ -105,37 +111,37 @@ public final class Mass extends LinearQuantity<Mass> {
     }
 
     /**
-     * {@return the quotient with a duration}
+     * {@return this mass divided by a duration}
      *
      * @param duration the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MassFlow over(Duration duration) {
         return MassFlow.kilogramsPerSecond(si() / duration.si());
     }
 
     /**
-     * {@return the quotient with a volume}
+     * {@return this mass divided by a volume}
      *
      * @param volume the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public Density over(Volume volume) {
         return Density.kilogramsPerCubicMetre(si() / volume.si());
     }
 
     /**
-     * {@return the quotient with a molar mass}
+     * {@return this mass divided by a molar mass}
      *
      * @param molarMass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public AmountOfSubstance over(MolarMass molarMass) {
         return AmountOfSubstance.moles(si() / molarMass.si());
     }
 
     /**
-     * {@return the product with a specific energy}
+     * {@return this mass times a specific energy}
      *
      * @param specificEnergy the other factor
      */
@@ -144,7 +150,7 @@ public final class Mass extends LinearQuantity<Mass> {
     }
 
     /**
-     * {@return the product with a specific entropy}
+     * {@return this mass times a specific entropy}
      *
      * @param specificEntropy the other factor
      */
@@ -153,7 +159,7 @@ public final class Mass extends LinearQuantity<Mass> {
     }
 
     /**
-     * {@return the product with a specific volume}
+     * {@return this mass times a specific volume}
      *
      * @param specificVolume the other factor
      */
@@ -162,7 +168,7 @@ public final class Mass extends LinearQuantity<Mass> {
     }
 
     /**
-     * {@return the product with a mass price}
+     * {@return this mass times a mass price}
      *
      * @param massPrice the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A mass per time (mass flow rate).
  *
- * <p>SI unit kg/s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit kg/s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MassFlow extends LinearQuantity<MassFlow> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     public static final QuantityKind<MassFlow, MassFlow> KIND = QuantityKind.linear(
             "mass flow",
             MassFlow.class,
-            new Dimension(0, 1, -1, 0, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.TIME),
             MassFlow::new,
             1,
             List.of(
@@ -29,61 +29,66 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
         super(si, KIND);
     }
 
+    private MassFlow(double value, Unit<MassFlow> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a mass flow}
+     * {@return a mass flow in kilograms per second}
      *
-     * @param value mass flow in kilograms per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MassFlow kilogramsPerSecond(double value) {
         return new MassFlow(value);
     }
 
     /**
-     * {@return a mass flow}
+     * {@return a mass flow in kilograms per hour}
      *
-     * @param value mass flow in kilograms per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilograms per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MassFlow kilogramsPerHour(double value) {
-        return new MassFlow(Units.KILOGRAM_PER_HOUR.toSi(value));
+        return new MassFlow(value, Units.KILOGRAM_PER_HOUR);
     }
 
     /**
-     * {@return a mass flow}
+     * {@return a mass flow in tonnes per hour}
      *
-     * @param value mass flow in tonnes per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of tonnes per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MassFlow tonnesPerHour(double value) {
-        return new MassFlow(Units.TONNE_PER_HOUR.toSi(value));
+        return new MassFlow(value, Units.TONNE_PER_HOUR);
     }
 
     /**
-     * {@return a mass flow}
+     * {@return a mass flow in tonnes per day}
      *
-     * @param value mass flow in tonnes per day
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of tonnes per day
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MassFlow tonnesPerDay(double value) {
-        return new MassFlow(Units.TONNE_PER_DAY.toSi(value));
+        return new MassFlow(value, Units.TONNE_PER_DAY);
     }
 
     /**
-     * {@return a mass flow}
+     * {@return a mass flow in pounds per hour}
      *
-     * @param value mass flow in pounds per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of pounds per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MassFlow poundsPerHour(double value) {
-        return new MassFlow(Units.POUND_PER_HOUR.toSi(value));
+        return new MassFlow(value, Units.POUND_PER_HOUR);
     }
 
     /**
      * {@return a mass flow from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MassFlow of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -93,7 +98,8 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
      * {@return the mass flow that a text states, such as {@code "12.5 kg/s"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MassFlow parse(String text) {
         return KIND.parse(text);
@@ -125,7 +131,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the product with a specific energy}
+     * {@return this mass flow times a specific energy}
      *
      * @param specificEnergy the other factor
      */
@@ -134,7 +140,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the product with a specific entropy}
+     * {@return this mass flow times a specific entropy}
      *
      * @param specificEntropy the other factor
      */
@@ -143,7 +149,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the product with a specific volume}
+     * {@return this mass flow times a specific volume}
      *
      * @param specificVolume the other factor
      */
@@ -152,7 +158,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the product with a specific heat capacity}
+     * {@return this mass flow times a specific heat capacity}
      *
      * @param specificHeatCapacity the other factor
      */
@@ -161,7 +167,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the product with a duration}
+     * {@return this mass flow times a duration}
      *
      * @param duration the other factor
      */
@@ -170,7 +176,7 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the product with a mass price}
+     * {@return this mass flow times a mass price}
      *
      * @param massPrice the other factor
      */
@@ -179,20 +185,20 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
     }
 
     /**
-     * {@return the quotient with a molar mass}
+     * {@return this mass flow divided by a molar mass}
      *
      * @param molarMass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MolarFlow over(MolarMass molarMass) {
         return MolarFlow.molesPerSecond(si() / molarMass.si());
     }
 
     /**
-     * {@return the quotient with a density}
+     * {@return this mass flow divided by a density}
      *
      * @param density the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public VolumeFlow over(Density density) {
         return VolumeFlow.cubicMetresPerSecond(si() / density.si());

@@ -1,12 +1,11 @@
 package lostwork.quantity;
 
 import java.util.List;
-import javax.measure.Quantity;
 
 /**
  * Money per mass, such as the price of a fuel or of emitted carbon dioxide.
  *
- * <p>SI unit ¤/kg. Any finite value exists. Immutable and thread-safe.
+ * <p>Coherent unit ¤/kg. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MassPrice extends LinearQuantity<MassPrice> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +14,7 @@ public final class MassPrice extends LinearQuantity<MassPrice> {
     public static final QuantityKind<MassPrice, MassPrice> KIND = QuantityKind.linear(
             "mass price",
             MassPrice.class,
-            new Dimension(0, -1, 0, 0, 0, 1),
+            Dimension.MONEY.dividedBy(Dimension.MASS),
             MassPrice::new,
             0.1,
             List.of(Units.CURRENCY_PER_TONNE, Units.CURRENCY_PER_KILOGRAM));
@@ -24,41 +23,36 @@ public final class MassPrice extends LinearQuantity<MassPrice> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a mass price}
-     *
-     * @param value mass price in units of the currency per tonne
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static MassPrice perTonne(double value) {
-        return new MassPrice(Units.CURRENCY_PER_TONNE.toSi(value));
+    private MassPrice(double value, Unit<MassPrice> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a mass price}
+     * {@return a mass price in units of the currency per tonne}
      *
-     * @param value mass price in units of the currency per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per tonne
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static MassPrice perTonne(double value) {
+        return new MassPrice(value, Units.CURRENCY_PER_TONNE);
+    }
+
+    /**
+     * {@return a mass price in units of the currency per kilogram}
+     *
+     * @param value the number of units of the currency per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MassPrice perKilogram(double value) {
         return new MassPrice(value);
     }
 
     /**
-     * {@return a mass price from a JSR-385 quantity in any unit of the same dimension}
-     *
-     * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
-     */
-    public static MassPrice of(Quantity<?> quantity) {
-        return KIND.of(quantity);
-    }
-
-    /**
      * {@return the mass price that a text states, such as {@code "12.5 ¤/t"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MassPrice parse(String text) {
         return KIND.parse(text);
@@ -75,7 +69,7 @@ public final class MassPrice extends LinearQuantity<MassPrice> {
     }
 
     /**
-     * {@return the product with a mass}
+     * {@return this mass price times a mass}
      *
      * @param mass the other factor
      */
@@ -84,7 +78,7 @@ public final class MassPrice extends LinearQuantity<MassPrice> {
     }
 
     /**
-     * {@return the product with a mass flow}
+     * {@return this mass price times a mass flow}
      *
      * @param massFlow the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An energy per amount of substance.
  *
- * <p>SI unit J/mol. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/mol. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,10 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
     public static final QuantityKind<MolarEnergy, MolarEnergy> KIND = QuantityKind.linear(
             "molar energy",
             MolarEnergy.class,
-            new Dimension(2, 1, -2, 0, -1, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.AMOUNT)
+                    .dividedBy(Dimension.TIME.pow(2)),
             MolarEnergy::new,
             1e4,
             List.of(Units.KILOJOULE_PER_MOLE, Units.JOULE_PER_MOLE));
@@ -24,21 +27,25 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a molar energy}
-     *
-     * @param value molar energy in kilojoules per mole
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static MolarEnergy kilojoulesPerMole(double value) {
-        return new MolarEnergy(Units.KILOJOULE_PER_MOLE.toSi(value));
+    private MolarEnergy(double value, Unit<MolarEnergy> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a molar energy}
+     * {@return a molar energy in kilojoules per mole}
      *
-     * @param value molar energy in joules per mole
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules per mole
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static MolarEnergy kilojoulesPerMole(double value) {
+        return new MolarEnergy(value, Units.KILOJOULE_PER_MOLE);
+    }
+
+    /**
+     * {@return a molar energy in joules per mole}
+     *
+     * @param value the number of joules per mole
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarEnergy joulesPerMole(double value) {
         return new MolarEnergy(value);
@@ -48,7 +55,8 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
      * {@return a molar energy from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarEnergy of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +66,8 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
      * {@return the molar energy that a text states, such as {@code "12.5 kJ/mol"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarEnergy parse(String text) {
         return KIND.parse(text);
@@ -75,17 +84,17 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
     }
 
     /**
-     * {@return the quotient with a molar mass}
+     * {@return this molar energy divided by a molar mass}
      *
      * @param molarMass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificEnergy over(MolarMass molarMass) {
         return SpecificEnergy.joulesPerKilogram(si() / molarMass.si());
     }
 
     /**
-     * {@return the product with a molar flow}
+     * {@return this molar energy times a molar flow}
      *
      * @param molarFlow the other factor
      */
@@ -94,7 +103,7 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
     }
 
     /**
-     * {@return the product with an amount of substance}
+     * {@return this molar energy times an amount of substance}
      *
      * @param amountOfSubstance the other factor
      */

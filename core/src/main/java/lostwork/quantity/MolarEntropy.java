@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An entropy per amount of substance.
  *
- * <p>SI unit J/(mol K). Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/(mol K). Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,11 @@ public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
     public static final QuantityKind<MolarEntropy, MolarEntropy> KIND = QuantityKind.linear(
             "molar entropy",
             MolarEntropy.class,
-            new Dimension(2, 1, -2, -1, -1, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.AMOUNT)
+                    .dividedBy(Dimension.TIME.pow(2)),
             MolarEntropy::new,
             100,
             List.of(Units.JOULE_PER_MOLE_KELVIN, Units.KILOJOULE_PER_MOLE_KELVIN));
@@ -24,31 +28,36 @@ public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
         super(si, KIND);
     }
 
+    private MolarEntropy(double value, Unit<MolarEntropy> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a molar entropy}
+     * {@return a molar entropy in joules per mole and kelvin}
      *
-     * @param value molar entropy in joules per mole and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of joules per mole and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarEntropy joulesPerMoleKelvin(double value) {
         return new MolarEntropy(value);
     }
 
     /**
-     * {@return a molar entropy}
+     * {@return a molar entropy in kilojoules per mole and kelvin}
      *
-     * @param value molar entropy in kilojoules per mole and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules per mole and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarEntropy kilojoulesPerMoleKelvin(double value) {
-        return new MolarEntropy(Units.KILOJOULE_PER_MOLE_KELVIN.toSi(value));
+        return new MolarEntropy(value, Units.KILOJOULE_PER_MOLE_KELVIN);
     }
 
     /**
      * {@return a molar entropy from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarEntropy of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +67,8 @@ public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
      * {@return the molar entropy that a text states, such as {@code "12.5 J/(mol K)"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarEntropy parse(String text) {
         return KIND.parse(text);
@@ -75,17 +85,17 @@ public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
     }
 
     /**
-     * {@return the quotient with a molar mass}
+     * {@return this molar entropy divided by a molar mass}
      *
      * @param molarMass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificEntropy over(MolarMass molarMass) {
         return SpecificEntropy.joulesPerKilogramKelvin(si() / molarMass.si());
     }
 
     /**
-     * {@return the product with a molar flow}
+     * {@return this molar entropy times a molar flow}
      *
      * @param molarFlow the other factor
      */
@@ -94,7 +104,7 @@ public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
     }
 
     /**
-     * {@return the product with a temperature}
+     * {@return this molar entropy times a temperature}
      *
      * @param temperature the other factor
      */

@@ -6,49 +6,55 @@ import javax.measure.Quantity;
 /**
  * An amount of substance per time.
  *
- * <p>SI unit mol/s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit mol/s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MolarFlow extends LinearQuantity<MolarFlow> {
     private static final long serialVersionUID = 1L;
 
     /** Name, units, bounds and scale of this quantity. */
     public static final QuantityKind<MolarFlow, MolarFlow> KIND = QuantityKind.linear(
-            "molar flow",
-            MolarFlow.class,
-            new Dimension(0, 0, -1, 0, 1, 0),
-            MolarFlow::new,
-            10,
-            List.of(Units.MOLE_PER_SECOND, Units.KILOMOLE_PER_HOUR));
+                    "molar flow",
+                    MolarFlow.class,
+                    Dimension.AMOUNT.dividedBy(Dimension.TIME),
+                    MolarFlow::new,
+                    10,
+                    List.of(Units.MOLE_PER_SECOND, Units.KILOMOLE_PER_HOUR))
+            .withHints(NormalCondition.hints());
 
     private MolarFlow(double si) {
         super(si, KIND);
     }
 
+    private MolarFlow(double value, Unit<MolarFlow> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a molar flow}
+     * {@return a molar flow in moles per second}
      *
-     * @param value molar flow in moles per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of moles per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarFlow molesPerSecond(double value) {
         return new MolarFlow(value);
     }
 
     /**
-     * {@return a molar flow}
+     * {@return a molar flow in kilomoles per hour}
      *
-     * @param value molar flow in kilomoles per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilomoles per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarFlow kilomolesPerHour(double value) {
-        return new MolarFlow(Units.KILOMOLE_PER_HOUR.toSi(value));
+        return new MolarFlow(value, Units.KILOMOLE_PER_HOUR);
     }
 
     /**
      * {@return a molar flow from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarFlow of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,10 +64,30 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
      * {@return the molar flow that a text states, such as {@code "12.5 mol/s"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarFlow parse(String text) {
         return KIND.parse(text);
+    }
+
+    /**
+     * {@return the molar flow that a text states, in moles such as {@code "3 kmol/h"} or as the volume flow of an ideal
+     * gas at a normal condition such as {@code "12000 Nm³/h"}}
+     *
+     * @param text a number with a decimal point, then a unit; {@code N} marks a volume counted at {@link
+     *     NormalCondition#DIN_1343}, {@code S} one counted at {@link NormalCondition#ISO_13443}
+     * @param condition the condition that a volume is counted at, which the mark in the text must agree with
+     * @throws UnreadableQuantityException if the text is not read, or its mark contradicts the condition
+     * @throws OutOfRangeException if the value is not allowed
+     */
+    public static MolarFlow parse(String text, NormalCondition condition) {
+        final QuantityText.Split split = QuantityText.split(text, KIND);
+        final Unit<VolumeFlow> unit = condition.unit(text, split.unit());
+        return unit == null
+                ? KIND.parse(text)
+                : new MolarFlow(
+                        unit.toSi(split.number()) / condition.molarVolume().si());
     }
 
     /** {@return the value in moles per second} */
@@ -75,7 +101,7 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
     }
 
     /**
-     * {@return the product with a molar mass}
+     * {@return this molar flow times a molar mass}
      *
      * @param molarMass the other factor
      */
@@ -84,7 +110,7 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
     }
 
     /**
-     * {@return the product with a molar energy}
+     * {@return this molar flow times a molar energy}
      *
      * @param molarEnergy the other factor
      */
@@ -93,7 +119,7 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
     }
 
     /**
-     * {@return the product with a molar entropy}
+     * {@return this molar flow times a molar entropy}
      *
      * @param molarEntropy the other factor
      */
@@ -102,7 +128,7 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
     }
 
     /**
-     * {@return the product with a molar volume}
+     * {@return this molar flow times a molar volume}
      *
      * @param molarVolume the other factor
      */
@@ -111,7 +137,7 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
     }
 
     /**
-     * {@return the product with a duration}
+     * {@return this molar flow times a duration}
      *
      * @param duration the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A heat capacity per amount of substance.
  *
- * <p>SI unit J/(mol K). Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/(mol K). Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,11 @@ public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
     public static final QuantityKind<MolarHeatCapacity, MolarHeatCapacity> KIND = QuantityKind.linear(
             "molar heat capacity",
             MolarHeatCapacity.class,
-            new Dimension(2, 1, -2, -1, -1, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH.pow(2))
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.AMOUNT)
+                    .dividedBy(Dimension.TIME.pow(2)),
             MolarHeatCapacity::new,
             30,
             List.of(Units.JOULE_PER_MOLE_KELVIN_CAPACITY));
@@ -24,11 +28,15 @@ public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
         super(si, KIND);
     }
 
+    private MolarHeatCapacity(double value, Unit<MolarHeatCapacity> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a molar heat capacity}
+     * {@return a molar heat capacity in joules per mole and kelvin}
      *
-     * @param value molar heat capacity in joules per mole and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of joules per mole and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarHeatCapacity joulesPerMoleKelvin(double value) {
         return new MolarHeatCapacity(value);
@@ -38,7 +46,8 @@ public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
      * {@return a molar heat capacity from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarHeatCapacity of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -48,7 +57,8 @@ public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
      * {@return the molar heat capacity that a text states, such as {@code "12.5 J/(mol K)"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarHeatCapacity parse(String text) {
         return KIND.parse(text);
@@ -60,17 +70,17 @@ public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
     }
 
     /**
-     * {@return the quotient with a molar mass}
+     * {@return this molar heat capacity divided by a molar mass}
      *
      * @param molarMass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificHeatCapacity over(MolarMass molarMass) {
         return SpecificHeatCapacity.joulesPerKilogramKelvin(si() / molarMass.si());
     }
 
     /**
-     * {@return the product with a temperature span}
+     * {@return this molar heat capacity times a temperature span}
      *
      * @param temperatureSpan the other factor
      */

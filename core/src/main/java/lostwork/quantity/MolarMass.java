@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A mass per amount of substance.
  *
- * <p>SI unit kg/mol. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit kg/mol. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MolarMass extends LinearQuantity<MolarMass> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
     public static final QuantityKind<MolarMass, MolarMass> KIND = QuantityKind.linear(
             "molar mass",
             MolarMass.class,
-            new Dimension(0, 1, 0, 0, -1, 0),
+            Dimension.MASS.dividedBy(Dimension.AMOUNT),
             MolarMass::new,
             0.03,
             List.of(Units.GRAM_PER_MOLE, Units.KILOGRAM_PER_MOLE));
@@ -24,21 +24,25 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a molar mass}
-     *
-     * @param value molar mass in grams per mole
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static MolarMass gramsPerMole(double value) {
-        return new MolarMass(Units.GRAM_PER_MOLE.toSi(value));
+    private MolarMass(double value, Unit<MolarMass> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a molar mass}
+     * {@return a molar mass in grams per mole}
      *
-     * @param value molar mass in kilograms per mole
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of grams per mole
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static MolarMass gramsPerMole(double value) {
+        return new MolarMass(value, Units.GRAM_PER_MOLE);
+    }
+
+    /**
+     * {@return a molar mass in kilograms per mole}
+     *
+     * @param value the number of kilograms per mole
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarMass kilogramsPerMole(double value) {
         return new MolarMass(value);
@@ -48,7 +52,8 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
      * {@return a molar mass from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarMass of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +63,8 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
      * {@return the molar mass that a text states, such as {@code "12.5 g/mol"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarMass parse(String text) {
         return KIND.parse(text);
@@ -75,7 +81,7 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
     }
 
     /**
-     * {@return the product with an amount of substance}
+     * {@return this molar mass times an amount of substance}
      *
      * @param amountOfSubstance the other factor
      */
@@ -84,7 +90,7 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
     }
 
     /**
-     * {@return the product with a molar flow}
+     * {@return this molar mass times a molar flow}
      *
      * @param molarFlow the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A volume per amount of substance.
  *
- * <p>SI unit m³/mol. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m³/mol. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MolarVolume extends LinearQuantity<MolarVolume> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class MolarVolume extends LinearQuantity<MolarVolume> {
     public static final QuantityKind<MolarVolume, MolarVolume> KIND = QuantityKind.linear(
             "molar volume",
             MolarVolume.class,
-            new Dimension(3, 0, 0, 0, -1, 0),
+            Dimension.LENGTH.pow(3).dividedBy(Dimension.AMOUNT),
             MolarVolume::new,
             0.025,
             List.of(Units.CUBIC_METRE_PER_MOLE, Units.LITRE_PER_MOLE));
@@ -24,31 +24,36 @@ public final class MolarVolume extends LinearQuantity<MolarVolume> {
         super(si, KIND);
     }
 
+    private MolarVolume(double value, Unit<MolarVolume> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a molar volume}
+     * {@return a molar volume in cubic metres per mole}
      *
-     * @param value molar volume in cubic metres per mole
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic metres per mole
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarVolume cubicMetresPerMole(double value) {
         return new MolarVolume(value);
     }
 
     /**
-     * {@return a molar volume}
+     * {@return a molar volume in litres per mole}
      *
-     * @param value molar volume in litres per mole
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of litres per mole
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MolarVolume litresPerMole(double value) {
-        return new MolarVolume(Units.LITRE_PER_MOLE.toSi(value));
+        return new MolarVolume(value, Units.LITRE_PER_MOLE);
     }
 
     /**
      * {@return a molar volume from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarVolume of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +63,8 @@ public final class MolarVolume extends LinearQuantity<MolarVolume> {
      * {@return the molar volume that a text states, such as {@code "12.5 m³/mol"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarVolume parse(String text) {
         return KIND.parse(text);
@@ -75,17 +81,17 @@ public final class MolarVolume extends LinearQuantity<MolarVolume> {
     }
 
     /**
-     * {@return the quotient with a molar mass}
+     * {@return this molar volume divided by a molar mass}
      *
      * @param molarMass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificVolume over(MolarMass molarMass) {
         return SpecificVolume.cubicMetresPerKilogram(si() / molarMass.si());
     }
 
     /**
-     * {@return the product with a molar flow}
+     * {@return this molar volume times a molar flow}
      *
      * @param molarFlow the other factor
      */
@@ -94,7 +100,7 @@ public final class MolarVolume extends LinearQuantity<MolarVolume> {
     }
 
     /**
-     * {@return the product with an amount of substance}
+     * {@return this molar volume times an amount of substance}
      *
      * @param amountOfSubstance the other factor
      */

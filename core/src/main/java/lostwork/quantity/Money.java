@@ -1,49 +1,43 @@
 package lostwork.quantity;
 
 import java.util.List;
-import javax.measure.Quantity;
 
 /**
  * An amount of money in one currency, which the caller knows; amounts in different currencies must not meet.
  *
- * <p>Any finite value exists. Immutable and thread-safe.
+ * <p>Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Money extends LinearQuantity<Money> {
     private static final long serialVersionUID = 1L;
 
     /** Name, units, bounds and scale of this quantity. */
-    public static final QuantityKind<Money, Money> KIND = QuantityKind.linear(
-            "money", Money.class, new Dimension(0, 0, 0, 0, 0, 1), Money::new, 1e3, List.of(Units.CURRENCY_UNIT));
+    public static final QuantityKind<Money, Money> KIND =
+            QuantityKind.linear("money", Money.class, Dimension.MONEY, Money::new, 1e3, List.of(Units.CURRENCY_UNIT));
 
     private Money(double si) {
         super(si, KIND);
     }
 
+    private Money(double value, Unit<Money> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a money}
+     * {@return an amount of money in units of the currency}
      *
-     * @param value money in units of the currency
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Money of(double value) {
         return new Money(value);
     }
 
     /**
-     * {@return a money from a JSR-385 quantity in any unit of the same dimension}
-     *
-     * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
-     */
-    public static Money of(Quantity<?> quantity) {
-        return KIND.of(quantity);
-    }
-
-    /**
      * {@return the money that a text states, such as {@code "12.5 ¤"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Money parse(String text) {
         return KIND.parse(text);
@@ -55,30 +49,30 @@ public final class Money extends LinearQuantity<Money> {
     }
 
     /**
-     * {@return the quotient with a duration}
+     * {@return this money divided by a duration}
      *
      * @param duration the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MoneyRate over(Duration duration) {
         return MoneyRate.perSecond(si() / duration.si());
     }
 
     /**
-     * {@return the quotient with an energy}
+     * {@return this money divided by an energy}
      *
      * @param energy the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public EnergyPrice over(Energy energy) {
         return EnergyPrice.perJoule(si() / energy.si());
     }
 
     /**
-     * {@return the quotient with a mass}
+     * {@return this money divided by a mass}
      *
      * @param mass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MassPrice over(Mass mass) {
         return MassPrice.perKilogram(si() / mass.si());

@@ -1,12 +1,11 @@
 package lostwork.quantity;
 
 import java.util.List;
-import javax.measure.Quantity;
 
 /**
  * Money per time.
  *
- * <p>SI unit ¤/s. Any finite value exists. Immutable and thread-safe.
+ * <p>Coherent unit ¤/s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class MoneyRate extends LinearQuantity<MoneyRate> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +14,7 @@ public final class MoneyRate extends LinearQuantity<MoneyRate> {
     public static final QuantityKind<MoneyRate, MoneyRate> KIND = QuantityKind.linear(
             "money rate",
             MoneyRate.class,
-            new Dimension(0, 0, -1, 0, 0, 1),
+            Dimension.MONEY.dividedBy(Dimension.TIME),
             MoneyRate::new,
             1,
             List.of(Units.CURRENCY_PER_YEAR, Units.CURRENCY_PER_HOUR, Units.CURRENCY_PER_SECOND));
@@ -24,51 +23,46 @@ public final class MoneyRate extends LinearQuantity<MoneyRate> {
         super(si, KIND);
     }
 
+    private MoneyRate(double value, Unit<MoneyRate> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a money rate}
+     * {@return a money rate in units of the currency per year of 8760 hours}
      *
-     * @param value money rate in units of the currency per year of 8760 hours
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per year of 8760 hours
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MoneyRate perYear(double value) {
-        return new MoneyRate(Units.CURRENCY_PER_YEAR.toSi(value));
+        return new MoneyRate(value, Units.CURRENCY_PER_YEAR);
     }
 
     /**
-     * {@return a money rate}
+     * {@return a money rate in units of the currency per hour}
      *
-     * @param value money rate in units of the currency per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MoneyRate perHour(double value) {
-        return new MoneyRate(Units.CURRENCY_PER_HOUR.toSi(value));
+        return new MoneyRate(value, Units.CURRENCY_PER_HOUR);
     }
 
     /**
-     * {@return a money rate}
+     * {@return a money rate in units of the currency per second}
      *
-     * @param value money rate in units of the currency per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of units of the currency per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static MoneyRate perSecond(double value) {
         return new MoneyRate(value);
     }
 
     /**
-     * {@return a money rate from a JSR-385 quantity in any unit of the same dimension}
-     *
-     * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
-     */
-    public static MoneyRate of(Quantity<?> quantity) {
-        return KIND.of(quantity);
-    }
-
-    /**
      * {@return the money rate that a text states, such as {@code "12.5 ¤/a"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static MoneyRate parse(String text) {
         return KIND.parse(text);
@@ -90,7 +84,7 @@ public final class MoneyRate extends LinearQuantity<MoneyRate> {
     }
 
     /**
-     * {@return the product with a duration}
+     * {@return this money rate times a duration}
      *
      * @param duration the other factor
      */
@@ -99,10 +93,10 @@ public final class MoneyRate extends LinearQuantity<MoneyRate> {
     }
 
     /**
-     * {@return the quotient with a power}
+     * {@return this money rate divided by a power}
      *
      * @param power the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public EnergyPrice over(Power power) {
         return EnergyPrice.perJoule(si() / power.si());

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An energy per time: heat rate, shaft power, exergy rate.
  *
- * <p>SI unit W. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Power extends LinearQuantity<Power> {
     private static final long serialVersionUID = 1L;
@@ -15,80 +15,92 @@ public final class Power extends LinearQuantity<Power> {
     public static final QuantityKind<Power, Power> KIND = QuantityKind.linear(
             "power",
             Power.class,
-            new Dimension(2, 1, -3, 0, 0, 0),
+            Dimension.MASS.times(Dimension.LENGTH.pow(2)).dividedBy(Dimension.TIME.pow(3)),
             Power::new,
             1e6,
-            List.of(Units.KILOWATT, Units.WATT, Units.MEGAWATT, Units.GIGAWATT, Units.HORSEPOWER, Units.BTU_PER_HOUR));
+            List.of(
+                    Units.KILOWATT,
+                    Units.WATT,
+                    Units.MEGAWATT,
+                    Units.GIGAWATT,
+                    Units.HORSEPOWER,
+                    Units.METRIC_HORSEPOWER,
+                    Units.BTU_PER_HOUR));
 
     private Power(double si) {
         super(si, KIND);
     }
 
-    /**
-     * {@return a power}
-     *
-     * @param value power in kilowatts
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static Power kilowatts(double value) {
-        return new Power(Units.KILOWATT.toSi(value));
+    private Power(double value, Unit<Power> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a power}
+     * {@return a power in kilowatts}
      *
-     * @param value power in watts
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatts
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static Power kilowatts(double value) {
+        return new Power(value, Units.KILOWATT);
+    }
+
+    /**
+     * {@return a power in watts}
+     *
+     * @param value the number of watts
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Power watts(double value) {
         return new Power(value);
     }
 
     /**
-     * {@return a power}
+     * {@return a power in megawatts}
      *
-     * @param value power in megawatts
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of megawatts
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Power megawatts(double value) {
-        return new Power(Units.MEGAWATT.toSi(value));
+        return new Power(value, Units.MEGAWATT);
     }
 
     /**
-     * {@return a power}
+     * {@return a power in gigawatts}
      *
-     * @param value power in gigawatts
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of gigawatts
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Power gigawatts(double value) {
-        return new Power(Units.GIGAWATT.toSi(value));
+        return new Power(value, Units.GIGAWATT);
     }
 
     /**
-     * {@return a power}
+     * {@return a power in mechanical horsepower (550 foot-pounds-force per second)}
      *
-     * @param value power in mechanical horsepower (550 foot-pounds-force per second)
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of mechanical horsepower (550 foot-pounds-force per second)
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Power horsepower(double value) {
-        return new Power(Units.HORSEPOWER.toSi(value));
+        return new Power(value, Units.HORSEPOWER);
     }
 
     /**
-     * {@return a power}
+     * {@return a power in British thermal units per hour}
      *
-     * @param value power in British thermal units per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of British thermal units per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Power btuPerHour(double value) {
-        return new Power(Units.BTU_PER_HOUR.toSi(value));
+        return new Power(value, Units.BTU_PER_HOUR);
     }
 
     /**
      * {@return a power from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Power of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -98,7 +110,8 @@ public final class Power extends LinearQuantity<Power> {
      * {@return the power that a text states, such as {@code "12.5 kW"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Power parse(String text) {
         return KIND.parse(text);
@@ -135,7 +148,7 @@ public final class Power extends LinearQuantity<Power> {
     }
 
     /**
-     * {@return the product with a duration}
+     * {@return this power times a duration}
      *
      * @param duration the other factor
      */
@@ -144,77 +157,77 @@ public final class Power extends LinearQuantity<Power> {
     }
 
     /**
-     * {@return the quotient with a mass flow}
+     * {@return this power divided by a mass flow}
      *
      * @param massFlow the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificEnergy over(MassFlow massFlow) {
         return SpecificEnergy.joulesPerKilogram(si() / massFlow.si());
     }
 
     /**
-     * {@return the quotient with a specific energy}
+     * {@return this power divided by a specific energy}
      *
      * @param specificEnergy the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MassFlow over(SpecificEnergy specificEnergy) {
         return MassFlow.kilogramsPerSecond(si() / specificEnergy.si());
     }
 
     /**
-     * {@return the quotient with a molar flow}
+     * {@return this power divided by a molar flow}
      *
      * @param molarFlow the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MolarEnergy over(MolarFlow molarFlow) {
         return MolarEnergy.joulesPerMole(si() / molarFlow.si());
     }
 
     /**
-     * {@return the quotient with a temperature span}
+     * {@return this power divided by a temperature span}
      *
      * @param temperatureSpan the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public Conductance over(TemperatureSpan temperatureSpan) {
         return Conductance.wattsPerKelvin(si() / temperatureSpan.si());
     }
 
     /**
-     * {@return the quotient with a thermal conductance}
+     * {@return this power divided by a thermal conductance}
      *
      * @param conductance the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public TemperatureSpan over(Conductance conductance) {
         return TemperatureSpan.kelvins(si() / conductance.si());
     }
 
     /**
-     * {@return the quotient with a heat capacity rate}
+     * {@return this power divided by a heat capacity rate}
      *
      * @param heatCapacityRate the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public TemperatureSpan over(HeatCapacityRate heatCapacityRate) {
         return TemperatureSpan.kelvins(si() / heatCapacityRate.si());
     }
 
     /**
-     * {@return the quotient with an area}
+     * {@return this power divided by an area}
      *
      * @param area the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public HeatFlux over(Area area) {
         return HeatFlux.wattsPerSquareMetre(si() / area.si());
     }
 
     /**
-     * {@return the product with an energy price}
+     * {@return this power times an energy price}
      *
      * @param energyPrice the other factor
      */
@@ -223,7 +236,7 @@ public final class Power extends LinearQuantity<Power> {
     }
 
     /**
-     * {@return the product with an emission factor}
+     * {@return this power times an emission factor}
      *
      * @param emissionFactor the other factor
      */

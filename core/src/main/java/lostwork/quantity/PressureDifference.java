@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A difference of two pressures, such as the loss along a pipe.
  *
- * <p>SI unit Pa. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit Pa. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class PressureDifference extends LinearQuantity<PressureDifference> {
     private static final long serialVersionUID = 1L;
@@ -15,13 +15,16 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
     public static final QuantityKind<PressureDifference, PressureDifference> KIND = QuantityKind.linear(
             "pressure difference",
             PressureDifference.class,
-            new Dimension(-1, 1, -2, 0, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.LENGTH).dividedBy(Dimension.TIME.pow(2)),
             PressureDifference::new,
             1e4,
             List.of(
                     Units.BAR_DIFFERENCE,
                     Units.PASCAL_DIFFERENCE,
                     Units.KILOPASCAL_DIFFERENCE,
+                    Units.MEGAPASCAL_DIFFERENCE,
+                    Units.MILLIMETRE_OF_WATER_DIFFERENCE,
+                    Units.INCH_OF_WATER_DIFFERENCE,
                     Units.MILLIBAR_DIFFERENCE,
                     Units.PSI_DIFFERENCE));
 
@@ -29,61 +32,66 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
         super(si, KIND);
     }
 
-    /**
-     * {@return a pressure difference}
-     *
-     * @param value pressure difference in bar
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static PressureDifference bars(double value) {
-        return new PressureDifference(Units.BAR_DIFFERENCE.toSi(value));
+    private PressureDifference(double value, Unit<PressureDifference> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a pressure difference}
+     * {@return a pressure difference in bar}
      *
-     * @param value pressure difference in pascal
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of bar
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static PressureDifference bars(double value) {
+        return new PressureDifference(value, Units.BAR_DIFFERENCE);
+    }
+
+    /**
+     * {@return a pressure difference in pascal}
+     *
+     * @param value the number of pascal
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static PressureDifference pascals(double value) {
         return new PressureDifference(value);
     }
 
     /**
-     * {@return a pressure difference}
+     * {@return a pressure difference in kilopascal}
      *
-     * @param value pressure difference in kilopascal
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilopascal
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static PressureDifference kilopascals(double value) {
-        return new PressureDifference(Units.KILOPASCAL_DIFFERENCE.toSi(value));
+        return new PressureDifference(value, Units.KILOPASCAL_DIFFERENCE);
     }
 
     /**
-     * {@return a pressure difference}
+     * {@return a pressure difference in millibar}
      *
-     * @param value pressure difference in millibar
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of millibar
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static PressureDifference millibars(double value) {
-        return new PressureDifference(Units.MILLIBAR_DIFFERENCE.toSi(value));
+        return new PressureDifference(value, Units.MILLIBAR_DIFFERENCE);
     }
 
     /**
-     * {@return a pressure difference}
+     * {@return a pressure difference in pounds-force per square inch}
      *
-     * @param value pressure difference in pounds-force per square inch
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of pounds-force per square inch
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static PressureDifference psiDifference(double value) {
-        return new PressureDifference(Units.PSI_DIFFERENCE.toSi(value));
+        return new PressureDifference(value, Units.PSI_DIFFERENCE);
     }
 
     /**
      * {@return a pressure difference from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static PressureDifference of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -93,7 +101,8 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
      * {@return the pressure difference that a text states, such as {@code "12.5 bar"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static PressureDifference parse(String text) {
         return KIND.parse(text);
@@ -125,7 +134,7 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
     }
 
     /**
-     * {@return the product with a specific volume}
+     * {@return this pressure difference times a specific volume}
      *
      * @param specificVolume the other factor
      */
@@ -134,7 +143,7 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
     }
 
     /**
-     * {@return the product with a volume}
+     * {@return this pressure difference times a volume}
      *
      * @param volume the other factor
      */
@@ -143,7 +152,7 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
     }
 
     /**
-     * {@return the product with a volume flow}
+     * {@return this pressure difference times a volume flow}
      *
      * @param volumeFlow the other factor
      */

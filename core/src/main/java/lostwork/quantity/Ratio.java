@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A plain number that compares two like quantities: an efficiency, a vapour fraction, a share.
  *
- * <p>Any finite value exists. Immutable and thread-safe.
+ * <p>Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Ratio extends LinearQuantity<Ratio> {
     private static final long serialVersionUID = 1L;
@@ -15,50 +15,55 @@ public final class Ratio extends LinearQuantity<Ratio> {
     public static final QuantityKind<Ratio, Ratio> KIND = QuantityKind.linear(
             "ratio",
             Ratio.class,
-            new Dimension(0, 0, 0, 0, 0, 0),
+            Dimension.ONE,
             Ratio::new,
             1,
-            List.of(Units.FRACTION, Units.PERCENT, Units.PER_MILLION));
+            List.of(Units.FRACTION, Units.PERCENT, Units.PER_MILLE, Units.PER_MILLION));
 
     private Ratio(double si) {
         super(si, KIND);
     }
 
+    private Ratio(double value, Unit<Ratio> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a ratio}
+     * {@return a ratio in parts of one}
      *
-     * @param value ratio in parts of one
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of parts of one
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Ratio fraction(double value) {
         return new Ratio(value);
     }
 
     /**
-     * {@return a ratio}
+     * {@return a ratio in percent}
      *
-     * @param value ratio in percent
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of percent
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Ratio percent(double value) {
-        return new Ratio(Units.PERCENT.toSi(value));
+        return new Ratio(value, Units.PERCENT);
     }
 
     /**
-     * {@return a ratio}
+     * {@return a ratio in parts per million}
      *
-     * @param value ratio in parts per million
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of parts per million
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Ratio partsPerMillion(double value) {
-        return new Ratio(Units.PER_MILLION.toSi(value));
+        return new Ratio(value, Units.PER_MILLION);
     }
 
     /**
      * {@return a ratio from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Ratio of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class Ratio extends LinearQuantity<Ratio> {
      * {@return the ratio that a text states, such as {@code "12.5 1"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Ratio parse(String text) {
         return KIND.parse(text);

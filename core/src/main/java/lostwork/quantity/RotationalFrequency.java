@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * Revolutions per time.
  *
- * <p>SI unit 1/s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit 1/s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class RotationalFrequency extends LinearQuantity<RotationalFrequency> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class RotationalFrequency extends LinearQuantity<RotationalFrequenc
     public static final QuantityKind<RotationalFrequency, RotationalFrequency> KIND = QuantityKind.linear(
             "rotational frequency",
             RotationalFrequency.class,
-            new Dimension(0, 0, -1, 0, 0, 0),
+            Dimension.ONE.dividedBy(Dimension.TIME),
             RotationalFrequency::new,
             50,
             List.of(Units.REVOLUTION_PER_MINUTE, Units.REVOLUTION_PER_SECOND));
@@ -24,21 +24,25 @@ public final class RotationalFrequency extends LinearQuantity<RotationalFrequenc
         super(si, KIND);
     }
 
-    /**
-     * {@return a rotational frequency}
-     *
-     * @param value rotational frequency in revolutions per minute
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static RotationalFrequency revolutionsPerMinute(double value) {
-        return new RotationalFrequency(Units.REVOLUTION_PER_MINUTE.toSi(value));
+    private RotationalFrequency(double value, Unit<RotationalFrequency> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a rotational frequency}
+     * {@return a rotational frequency in revolutions per minute}
      *
-     * @param value rotational frequency in revolutions per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of revolutions per minute
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static RotationalFrequency revolutionsPerMinute(double value) {
+        return new RotationalFrequency(value, Units.REVOLUTION_PER_MINUTE);
+    }
+
+    /**
+     * {@return a rotational frequency in revolutions per second}
+     *
+     * @param value the number of revolutions per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static RotationalFrequency revolutionsPerSecond(double value) {
         return new RotationalFrequency(value);
@@ -48,7 +52,8 @@ public final class RotationalFrequency extends LinearQuantity<RotationalFrequenc
      * {@return a rotational frequency from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static RotationalFrequency of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +63,8 @@ public final class RotationalFrequency extends LinearQuantity<RotationalFrequenc
      * {@return the rotational frequency that a text states, such as {@code "12.5 1/min"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static RotationalFrequency parse(String text) {
         return KIND.parse(text);

@@ -1,8 +1,7 @@
 package lostwork.quantity;
 
-import java.io.IOException;
 import java.io.InvalidObjectException;
-import java.io.ObjectInputStream;
+import java.io.ObjectStreamException;
 import java.io.Serializable;
 import javax.measure.Quantity;
 
@@ -31,10 +30,22 @@ public abstract class ScalarQuantity<Q extends ScalarQuantity<Q, D>, D extends L
      *
      * @param si the value in the coherent SI unit
      * @param kind the kind, which sets the bounds
-     * @throws IllegalArgumentException if the value is NaN, infinite or outside the bounds of the kind
+     * @throws OutOfRangeException if the value is NaN, infinite or outside the bounds of the kind
      */
     protected ScalarQuantity(double si, QuantityKind<Q, D> kind) {
         this.si = kind.requireValid(si);
+    }
+
+    /**
+     * Checks and stores a value that is given in a unit; a refusal is worded in that unit.
+     *
+     * @param value the value in the unit
+     * @param unit the unit
+     * @param kind the kind, which sets the bounds
+     * @throws OutOfRangeException if the value is NaN, infinite or outside the bounds of the kind
+     */
+    protected ScalarQuantity(double value, Unit<Q> unit, QuantityKind<Q, D> kind) {
+        this.si = kind.requireValid(value, unit);
     }
 
     /** {@return the kind of this quantity: its units, bounds, scale and difference} */
@@ -62,12 +73,38 @@ public abstract class ScalarQuantity<Q extends ScalarQuantity<Q, D>, D extends L
      * @throws IllegalArgumentException if the number of digits is outside 1 to 17
      */
     public final String format(Unit<Q> unit, int significantDigits) {
-        return QuantityText.print(unit.fromSi(si), significantDigits) + " " + unit.symbol();
+        return QuantityText.withUnit(QuantityText.print(unit.fromSi(si), significantDigits), unit);
     }
 
-    /** {@return the value as a JSR-385 quantity in the coherent SI unit} */
+    /**
+     * {@return a text that {@code parse} of the same kind reads back as an equal value, such as {@code 813.15 K}}
+     *
+     * <p>It is in the coherent SI unit, with as many digits as it takes, and meant for files; {@link #toString} is meant
+     * for people.
+     */
+    public final String toExactString() {
+        return QuantityText.withUnit(QuantityText.shortest(si), kind().coherentUnit());
+    }
+
+    /**
+     * {@return the value as a JSR-385 quantity in the coherent SI unit}
+     *
+     * @throws UnsupportedOperationException if the kind counts money, for which JSR-385 has no unit
+     */
     public final Quantity<?> asQuantity() {
-        return JsrBridge.toQuantity(si, kind().dimension());
+        return JsrBridge.toQuantity(si, kind());
+    }
+
+    /**
+     * {@return the value as a JSR-385 quantity in a unit of the same dimension}
+     *
+     * @param <U> the JSR-385 type of the unit
+     * @param unit the unit
+     * @throws IllegalArgumentException if the unit has another dimension, or counts angles
+     * @throws UnsupportedOperationException if the kind counts money, for which JSR-385 has no unit
+     */
+    public final <U extends Quantity<U>> Quantity<U> asQuantity(javax.measure.Unit<U> unit) {
+        return JsrBridge.toQuantity(si, kind(), unit);
     }
 
     @Override
@@ -92,20 +129,17 @@ public abstract class ScalarQuantity<Q extends ScalarQuantity<Q, D>, D extends L
     @Override
     public final String toString() {
         final Unit<Q> unit = kind().displayUnit();
-        return QuantityText.printShort(unit.fromSi(si), 7) + " " + unit.symbol();
+        return QuantityText.withUnit(QuantityText.printShort(unit.fromSi(si), 7), unit);
     }
 
     /**
-     * Reads a value and applies the checks of its kind.
+     * {@return the value that was read from a stream, checked and made as every other value is}
      *
-     * @param in the stream to read from
-     * @throws IOException if the stream fails or the value is not allowed
-     * @throws ClassNotFoundException if a class of the stream is missing
+     * @throws ObjectStreamException if the value is not allowed
      */
-    private void readObject(ObjectInputStream in) throws IOException, ClassNotFoundException {
-        in.defaultReadObject();
+    protected final Object readResolve() throws ObjectStreamException {
         try {
-            kind().requireValid(si);
+            return kind().ofSi(si);
         } catch (IllegalArgumentException e) {
             final InvalidObjectException refused = new InvalidObjectException(e.getMessage());
             refused.initCause(e);

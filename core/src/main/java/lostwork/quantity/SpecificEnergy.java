@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An energy per mass: specific enthalpy, internal energy, exergy, work.
  *
- * <p>SI unit J/kg. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/kg. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
     public static final QuantityKind<SpecificEnergy, SpecificEnergy> KIND = QuantityKind.linear(
             "specific energy",
             SpecificEnergy.class,
-            new Dimension(2, 0, -2, 0, 0, 0),
+            Dimension.LENGTH.pow(2).dividedBy(Dimension.TIME.pow(2)),
             SpecificEnergy::new,
             1e5,
             List.of(
@@ -29,61 +29,66 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a specific energy}
-     *
-     * @param value specific energy in kilojoules per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static SpecificEnergy kilojoulesPerKilogram(double value) {
-        return new SpecificEnergy(Units.KILOJOULE_PER_KILOGRAM.toSi(value));
+    private SpecificEnergy(double value, Unit<SpecificEnergy> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a specific energy}
+     * {@return a specific energy in kilojoules per kilogram}
      *
-     * @param value specific energy in joules per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static SpecificEnergy kilojoulesPerKilogram(double value) {
+        return new SpecificEnergy(value, Units.KILOJOULE_PER_KILOGRAM);
+    }
+
+    /**
+     * {@return a specific energy in joules per kilogram}
+     *
+     * @param value the number of joules per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificEnergy joulesPerKilogram(double value) {
         return new SpecificEnergy(value);
     }
 
     /**
-     * {@return a specific energy}
+     * {@return a specific energy in megajoules per kilogram}
      *
-     * @param value specific energy in megajoules per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of megajoules per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificEnergy megajoulesPerKilogram(double value) {
-        return new SpecificEnergy(Units.MEGAJOULE_PER_KILOGRAM.toSi(value));
+        return new SpecificEnergy(value, Units.MEGAJOULE_PER_KILOGRAM);
     }
 
     /**
-     * {@return a specific energy}
+     * {@return a specific energy in kilowatt hours per kilogram}
      *
-     * @param value specific energy in kilowatt hours per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilowatt hours per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificEnergy kilowattHoursPerKilogram(double value) {
-        return new SpecificEnergy(Units.KILOWATT_HOUR_PER_KILOGRAM.toSi(value));
+        return new SpecificEnergy(value, Units.KILOWATT_HOUR_PER_KILOGRAM);
     }
 
     /**
-     * {@return a specific energy}
+     * {@return a specific energy in British thermal units (International Table) per pound}
      *
-     * @param value specific energy in British thermal units (International Table) per pound
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of British thermal units (International Table) per pound
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificEnergy btuPerPound(double value) {
-        return new SpecificEnergy(Units.BTU_PER_POUND.toSi(value));
+        return new SpecificEnergy(value, Units.BTU_PER_POUND);
     }
 
     /**
      * {@return a specific energy from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificEnergy of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -93,7 +98,8 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
      * {@return the specific energy that a text states, such as {@code "12.5 kJ/kg"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificEnergy parse(String text) {
         return KIND.parse(text);
@@ -125,7 +131,7 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
     }
 
     /**
-     * {@return the product with a mass flow}
+     * {@return this specific energy times a mass flow}
      *
      * @param massFlow the other factor
      */
@@ -134,7 +140,7 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
     }
 
     /**
-     * {@return the product with a mass}
+     * {@return this specific energy times a mass}
      *
      * @param mass the other factor
      */
@@ -143,7 +149,7 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
     }
 
     /**
-     * {@return the product with a molar mass}
+     * {@return this specific energy times a molar mass}
      *
      * @param molarMass the other factor
      */
@@ -152,20 +158,20 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
     }
 
     /**
-     * {@return the quotient with a temperature span}
+     * {@return this specific energy divided by a temperature span}
      *
      * @param temperatureSpan the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificHeatCapacity over(TemperatureSpan temperatureSpan) {
         return SpecificHeatCapacity.joulesPerKilogramKelvin(si() / temperatureSpan.si());
     }
 
     /**
-     * {@return the quotient with a specific heat capacity}
+     * {@return this specific energy divided by a specific heat capacity}
      *
      * @param specificHeatCapacity the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public TemperatureSpan over(SpecificHeatCapacity specificHeatCapacity) {
         return TemperatureSpan.kelvins(si() / specificHeatCapacity.si());

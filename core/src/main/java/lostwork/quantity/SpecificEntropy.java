@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * An entropy per mass.
  *
- * <p>SI unit J/(kg K). Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/(kg K). Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
     public static final QuantityKind<SpecificEntropy, SpecificEntropy> KIND = QuantityKind.linear(
             "specific entropy",
             SpecificEntropy.class,
-            new Dimension(2, 0, -2, -1, 0, 0),
+            Dimension.LENGTH.pow(2).dividedBy(Dimension.TEMPERATURE).dividedBy(Dimension.TIME.pow(2)),
             SpecificEntropy::new,
             1e3,
             List.of(Units.KILOJOULE_PER_KILOGRAM_KELVIN, Units.JOULE_PER_KILOGRAM_KELVIN, Units.BTU_PER_POUND_RANKINE));
@@ -24,41 +24,46 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a specific entropy}
-     *
-     * @param value specific entropy in kilojoules per kilogram and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static SpecificEntropy kilojoulesPerKilogramKelvin(double value) {
-        return new SpecificEntropy(Units.KILOJOULE_PER_KILOGRAM_KELVIN.toSi(value));
+    private SpecificEntropy(double value, Unit<SpecificEntropy> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a specific entropy}
+     * {@return a specific entropy in kilojoules per kilogram and kelvin}
      *
-     * @param value specific entropy in joules per kilogram and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules per kilogram and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static SpecificEntropy kilojoulesPerKilogramKelvin(double value) {
+        return new SpecificEntropy(value, Units.KILOJOULE_PER_KILOGRAM_KELVIN);
+    }
+
+    /**
+     * {@return a specific entropy in joules per kilogram and kelvin}
+     *
+     * @param value the number of joules per kilogram and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificEntropy joulesPerKilogramKelvin(double value) {
         return new SpecificEntropy(value);
     }
 
     /**
-     * {@return a specific entropy}
+     * {@return a specific entropy in British thermal units per pound and degree Rankine}
      *
-     * @param value specific entropy in British thermal units per pound and degree Rankine
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of British thermal units per pound and degree Rankine
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificEntropy btuPerPoundRankine(double value) {
-        return new SpecificEntropy(Units.BTU_PER_POUND_RANKINE.toSi(value));
+        return new SpecificEntropy(value, Units.BTU_PER_POUND_RANKINE);
     }
 
     /**
      * {@return a specific entropy from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificEntropy of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
      * {@return the specific entropy that a text states, such as {@code "12.5 kJ/(kg K)"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificEntropy parse(String text) {
         return KIND.parse(text);
@@ -90,7 +96,7 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
     }
 
     /**
-     * {@return the product with a mass flow}
+     * {@return this specific entropy times a mass flow}
      *
      * @param massFlow the other factor
      */
@@ -99,7 +105,7 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
     }
 
     /**
-     * {@return the product with a mass}
+     * {@return this specific entropy times a mass}
      *
      * @param mass the other factor
      */
@@ -108,7 +114,7 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
     }
 
     /**
-     * {@return the product with a temperature}
+     * {@return this specific entropy times a temperature}
      *
      * @param temperature the other factor
      */
@@ -117,7 +123,7 @@ public final class SpecificEntropy extends LinearQuantity<SpecificEntropy> {
     }
 
     /**
-     * {@return the product with a molar mass}
+     * {@return this specific entropy times a molar mass}
      *
      * @param molarMass the other factor
      */

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A heat capacity per mass.
  *
- * <p>SI unit J/(kg K). Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit J/(kg K). Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapacity> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapac
     public static final QuantityKind<SpecificHeatCapacity, SpecificHeatCapacity> KIND = QuantityKind.linear(
             "specific heat capacity",
             SpecificHeatCapacity.class,
-            new Dimension(2, 0, -2, -1, 0, 0),
+            Dimension.LENGTH.pow(2).dividedBy(Dimension.TEMPERATURE).dividedBy(Dimension.TIME.pow(2)),
             SpecificHeatCapacity::new,
             1e3,
             List.of(
@@ -27,41 +27,46 @@ public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapac
         super(si, KIND);
     }
 
-    /**
-     * {@return a specific heat capacity}
-     *
-     * @param value specific heat capacity in kilojoules per kilogram and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static SpecificHeatCapacity kilojoulesPerKilogramKelvin(double value) {
-        return new SpecificHeatCapacity(Units.KILOJOULE_PER_KILOGRAM_KELVIN_CAPACITY.toSi(value));
+    private SpecificHeatCapacity(double value, Unit<SpecificHeatCapacity> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a specific heat capacity}
+     * {@return a specific heat capacity in kilojoules per kilogram and kelvin}
      *
-     * @param value specific heat capacity in joules per kilogram and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilojoules per kilogram and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static SpecificHeatCapacity kilojoulesPerKilogramKelvin(double value) {
+        return new SpecificHeatCapacity(value, Units.KILOJOULE_PER_KILOGRAM_KELVIN_CAPACITY);
+    }
+
+    /**
+     * {@return a specific heat capacity in joules per kilogram and kelvin}
+     *
+     * @param value the number of joules per kilogram and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificHeatCapacity joulesPerKilogramKelvin(double value) {
         return new SpecificHeatCapacity(value);
     }
 
     /**
-     * {@return a specific heat capacity}
+     * {@return a specific heat capacity in British thermal units per pound and degree Rankine}
      *
-     * @param value specific heat capacity in British thermal units per pound and degree Rankine
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of British thermal units per pound and degree Rankine
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificHeatCapacity btuPerPoundRankine(double value) {
-        return new SpecificHeatCapacity(Units.BTU_PER_POUND_RANKINE_CAPACITY.toSi(value));
+        return new SpecificHeatCapacity(value, Units.BTU_PER_POUND_RANKINE_CAPACITY);
     }
 
     /**
      * {@return a specific heat capacity from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificHeatCapacity of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -71,7 +76,8 @@ public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapac
      * {@return the specific heat capacity that a text states, such as {@code "12.5 kJ/(kg K)"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificHeatCapacity parse(String text) {
         return KIND.parse(text);
@@ -93,7 +99,7 @@ public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapac
     }
 
     /**
-     * {@return the product with a temperature span}
+     * {@return this specific heat capacity times a temperature span}
      *
      * @param temperatureSpan the other factor
      */
@@ -102,7 +108,7 @@ public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapac
     }
 
     /**
-     * {@return the product with a mass flow}
+     * {@return this specific heat capacity times a mass flow}
      *
      * @param massFlow the other factor
      */
@@ -111,7 +117,7 @@ public final class SpecificHeatCapacity extends LinearQuantity<SpecificHeatCapac
     }
 
     /**
-     * {@return the product with a molar mass}
+     * {@return this specific heat capacity times a molar mass}
      *
      * @param molarMass the other factor
      */

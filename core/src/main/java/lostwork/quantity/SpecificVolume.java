@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A volume per mass.
  *
- * <p>SI unit m³/kg. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m³/kg. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
     public static final QuantityKind<SpecificVolume, SpecificVolume> KIND = QuantityKind.linear(
             "specific volume",
             SpecificVolume.class,
-            new Dimension(3, -1, 0, 0, 0, 0),
+            Dimension.LENGTH.pow(3).dividedBy(Dimension.MASS),
             SpecificVolume::new,
             1,
             List.of(Units.CUBIC_METRE_PER_KILOGRAM, Units.LITRE_PER_KILOGRAM, Units.CUBIC_FOOT_PER_POUND));
@@ -24,41 +24,46 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
         super(si, KIND);
     }
 
+    private SpecificVolume(double value, Unit<SpecificVolume> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a specific volume}
+     * {@return a specific volume in cubic metres per kilogram}
      *
-     * @param value specific volume in cubic metres per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic metres per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificVolume cubicMetresPerKilogram(double value) {
         return new SpecificVolume(value);
     }
 
     /**
-     * {@return a specific volume}
+     * {@return a specific volume in litres per kilogram}
      *
-     * @param value specific volume in litres per kilogram
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of litres per kilogram
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificVolume litresPerKilogram(double value) {
-        return new SpecificVolume(Units.LITRE_PER_KILOGRAM.toSi(value));
+        return new SpecificVolume(value, Units.LITRE_PER_KILOGRAM);
     }
 
     /**
-     * {@return a specific volume}
+     * {@return a specific volume in cubic feet per pound}
      *
-     * @param value specific volume in cubic feet per pound
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic feet per pound
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SpecificVolume cubicFeetPerPound(double value) {
-        return new SpecificVolume(Units.CUBIC_FOOT_PER_POUND.toSi(value));
+        return new SpecificVolume(value, Units.CUBIC_FOOT_PER_POUND);
     }
 
     /**
      * {@return a specific volume from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificVolume of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
      * {@return the specific volume that a text states, such as {@code "12.5 m³/kg"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SpecificVolume parse(String text) {
         return KIND.parse(text);
@@ -90,7 +96,7 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
     }
 
     /**
-     * {@return the product with a mass}
+     * {@return this specific volume times a mass}
      *
      * @param mass the other factor
      */
@@ -99,7 +105,7 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
     }
 
     /**
-     * {@return the product with a mass flow}
+     * {@return this specific volume times a mass flow}
      *
      * @param massFlow the other factor
      */
@@ -108,7 +114,7 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
     }
 
     /**
-     * {@return the product with a molar mass}
+     * {@return this specific volume times a molar mass}
      *
      * @param molarMass the other factor
      */

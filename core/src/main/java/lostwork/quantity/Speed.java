@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A length per time.
  *
- * <p>SI unit m/s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m/s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Speed extends LinearQuantity<Speed> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class Speed extends LinearQuantity<Speed> {
     public static final QuantityKind<Speed, Speed> KIND = QuantityKind.linear(
             "speed",
             Speed.class,
-            new Dimension(1, 0, -1, 0, 0, 0),
+            Dimension.LENGTH.dividedBy(Dimension.TIME),
             Speed::new,
             10,
             List.of(Units.METRE_PER_SECOND, Units.KILOMETRE_PER_HOUR, Units.FOOT_PER_SECOND));
@@ -24,41 +24,46 @@ public final class Speed extends LinearQuantity<Speed> {
         super(si, KIND);
     }
 
+    private Speed(double value, Unit<Speed> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a speed}
+     * {@return a speed in metres per second}
      *
-     * @param value speed in metres per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of metres per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Speed metresPerSecond(double value) {
         return new Speed(value);
     }
 
     /**
-     * {@return a speed}
+     * {@return a speed in kilometres per hour}
      *
-     * @param value speed in kilometres per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kilometres per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Speed kilometresPerHour(double value) {
-        return new Speed(Units.KILOMETRE_PER_HOUR.toSi(value));
+        return new Speed(value, Units.KILOMETRE_PER_HOUR);
     }
 
     /**
-     * {@return a speed}
+     * {@return a speed in feet per second}
      *
-     * @param value speed in feet per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of feet per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Speed feetPerSecond(double value) {
-        return new Speed(Units.FOOT_PER_SECOND.toSi(value));
+        return new Speed(value, Units.FOOT_PER_SECOND);
     }
 
     /**
      * {@return a speed from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Speed of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -68,7 +73,8 @@ public final class Speed extends LinearQuantity<Speed> {
      * {@return the speed that a text states, such as {@code "12.5 m/s"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Speed parse(String text) {
         return KIND.parse(text);
@@ -90,7 +96,7 @@ public final class Speed extends LinearQuantity<Speed> {
     }
 
     /**
-     * {@return the product with an area}
+     * {@return this speed times an area}
      *
      * @param area the other factor
      */

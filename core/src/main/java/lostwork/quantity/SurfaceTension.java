@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A force per length along a liquid surface.
  *
- * <p>SI unit N/m. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit N/m. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class SurfaceTension extends LinearQuantity<SurfaceTension> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,7 @@ public final class SurfaceTension extends LinearQuantity<SurfaceTension> {
     public static final QuantityKind<SurfaceTension, SurfaceTension> KIND = QuantityKind.linear(
             "surface tension",
             SurfaceTension.class,
-            new Dimension(0, 1, -2, 0, 0, 0),
+            Dimension.MASS.dividedBy(Dimension.TIME.pow(2)),
             SurfaceTension::new,
             0.05,
             List.of(Units.MILLINEWTON_PER_METRE, Units.NEWTON_PER_METRE));
@@ -24,21 +24,25 @@ public final class SurfaceTension extends LinearQuantity<SurfaceTension> {
         super(si, KIND);
     }
 
-    /**
-     * {@return a surface tension}
-     *
-     * @param value surface tension in millinewtons per metre
-     * @throws IllegalArgumentException if the value is NaN or infinite
-     */
-    public static SurfaceTension millinewtonsPerMetre(double value) {
-        return new SurfaceTension(Units.MILLINEWTON_PER_METRE.toSi(value));
+    private SurfaceTension(double value, Unit<SurfaceTension> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a surface tension}
+     * {@return a surface tension in millinewtons per metre}
      *
-     * @param value surface tension in newtons per metre
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of millinewtons per metre
+     * @throws OutOfRangeException if the value is NaN or infinite
+     */
+    public static SurfaceTension millinewtonsPerMetre(double value) {
+        return new SurfaceTension(value, Units.MILLINEWTON_PER_METRE);
+    }
+
+    /**
+     * {@return a surface tension in newtons per metre}
+     *
+     * @param value the number of newtons per metre
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static SurfaceTension newtonsPerMetre(double value) {
         return new SurfaceTension(value);
@@ -48,7 +52,8 @@ public final class SurfaceTension extends LinearQuantity<SurfaceTension> {
      * {@return a surface tension from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SurfaceTension of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +63,8 @@ public final class SurfaceTension extends LinearQuantity<SurfaceTension> {
      * {@return the surface tension that a text states, such as {@code "12.5 mN/m"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static SurfaceTension parse(String text) {
         return KIND.parse(text);

@@ -1,6 +1,7 @@
 package lostwork.quantity;
 
 import java.util.List;
+import java.util.Map;
 import javax.measure.Quantity;
 
 /**
@@ -13,63 +14,77 @@ public final class Temperature extends ScalarQuantity<Temperature, TemperatureSp
 
     /** Name, units, bounds and scale of this quantity. */
     public static final QuantityKind<Temperature, TemperatureSpan> KIND = QuantityKind.point(
-            "temperature",
-            Temperature.class,
-            Temperature::new,
-            Double.MIN_VALUE,
-            100,
-            TemperatureSpan.KIND,
-            List.of(Units.CELSIUS, Units.KELVIN, Units.FAHRENHEIT, Units.RANKINE));
+                    "temperature",
+                    Temperature.class,
+                    Temperature::new,
+                    Double.MIN_VALUE,
+                    100,
+                    TemperatureSpan.KIND,
+                    List.of(Units.CELSIUS, Units.KELVIN, Units.FAHRENHEIT, Units.RANKINE))
+            .withLimit("absolute zero", "")
+            .withHints(Map.of(
+                    "C", "C is the coulomb: write °C",
+                    "c", "write °C",
+                    "° C", "write °C",
+                    "F", "F is the farad: write °F",
+                    "R", "write °R",
+                    "°K", "the kelvin has no degree sign: write K",
+                    "°", "write °C or °F"));
 
     private Temperature(double si) {
         super(si, KIND);
     }
 
-    /**
-     * {@return a temperature}
-     *
-     * @param value temperature in degrees Celsius
-     * @throws IllegalArgumentException if the value is NaN, infinite or not above absolute zero
-     */
-    public static Temperature celsius(double value) {
-        return new Temperature(Units.CELSIUS.toSi(value));
+    private Temperature(double value, Unit<Temperature> unit) {
+        super(value, unit, KIND);
     }
 
     /**
-     * {@return a temperature}
+     * {@return a temperature in degrees Celsius}
      *
-     * @param value temperature in kelvin
-     * @throws IllegalArgumentException if the value is NaN, infinite or not above absolute zero
+     * @param value the number of degrees Celsius
+     * @throws OutOfRangeException if the value is NaN, infinite or not above absolute zero
+     */
+    public static Temperature celsius(double value) {
+        return new Temperature(value, Units.CELSIUS);
+    }
+
+    /**
+     * {@return a temperature in kelvin}
+     *
+     * @param value the number of kelvin
+     * @throws OutOfRangeException if the value is NaN, infinite or not above absolute zero
      */
     public static Temperature kelvin(double value) {
         return new Temperature(value);
     }
 
     /**
-     * {@return a temperature}
+     * {@return a temperature in degrees Fahrenheit}
      *
-     * @param value temperature in degrees Fahrenheit
-     * @throws IllegalArgumentException if the value is NaN, infinite or not above absolute zero
+     * @param value the number of degrees Fahrenheit
+     * @throws OutOfRangeException if the value is NaN, infinite or not above absolute zero
      */
     public static Temperature fahrenheit(double value) {
-        return new Temperature(Units.FAHRENHEIT.toSi(value));
+        return new Temperature(value, Units.FAHRENHEIT);
     }
 
     /**
-     * {@return a temperature}
+     * {@return a temperature in degrees Rankine}
      *
-     * @param value temperature in degrees Rankine
-     * @throws IllegalArgumentException if the value is NaN, infinite or not above absolute zero
+     * @param value the number of degrees Rankine
+     * @throws OutOfRangeException if the value is NaN, infinite or not above absolute zero
      */
     public static Temperature rankine(double value) {
-        return new Temperature(Units.RANKINE.toSi(value));
+        return new Temperature(value, Units.RANKINE);
     }
 
     /**
      * {@return a temperature from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Temperature of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -79,7 +94,8 @@ public final class Temperature extends ScalarQuantity<Temperature, TemperatureSp
      * {@return the temperature that a text states, such as {@code "25 °C"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Temperature parse(String text) {
         return KIND.parse(text);
@@ -118,7 +134,7 @@ public final class Temperature extends ScalarQuantity<Temperature, TemperatureSp
      * {@return a value that lies above this one}
      *
      * @param difference how far
-     * @throws IllegalArgumentException if the result does not exist
+     * @throws OutOfRangeException if the result does not exist
      */
     public Temperature plus(TemperatureSpan difference) {
         return new Temperature(si() + difference.si());
@@ -128,7 +144,7 @@ public final class Temperature extends ScalarQuantity<Temperature, TemperatureSp
      * {@return a value that lies below this one}
      *
      * @param difference how far
-     * @throws IllegalArgumentException if the result does not exist
+     * @throws OutOfRangeException if the result does not exist
      */
     public Temperature minus(TemperatureSpan difference) {
         return new Temperature(si() - difference.si());

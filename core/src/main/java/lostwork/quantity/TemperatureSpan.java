@@ -1,54 +1,65 @@
 package lostwork.quantity;
 
 import java.util.List;
+import java.util.Map;
 import javax.measure.Quantity;
 
 /**
  * A difference of two temperatures.
  *
- * <p>SI unit K. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit K. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class TemperatureSpan extends LinearQuantity<TemperatureSpan> {
     private static final long serialVersionUID = 1L;
 
     /** Name, units, bounds and scale of this quantity. */
     public static final QuantityKind<TemperatureSpan, TemperatureSpan> KIND = QuantityKind.linear(
-            "temperature span",
-            TemperatureSpan.class,
-            new Dimension(0, 0, 0, 1, 0, 0),
-            TemperatureSpan::new,
-            10,
-            List.of(Units.KELVIN_SPAN, Units.RANKINE_SPAN));
+                    "temperature span",
+                    TemperatureSpan.class,
+                    Dimension.TEMPERATURE,
+                    TemperatureSpan::new,
+                    10,
+                    List.of(Units.KELVIN_SPAN, Units.RANKINE_SPAN))
+            .withHints(Map.of(
+                    "°C", "°C states a point on a scale: write a span in K, which is as large",
+                    "C", "write a span in K",
+                    "°F", "°F states a point on a scale: write a span in °R, which is as large",
+                    "F", "write a span in °R"));
 
     private TemperatureSpan(double si) {
         super(si, KIND);
     }
 
+    private TemperatureSpan(double value, Unit<TemperatureSpan> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a temperature span}
+     * {@return a temperature span in kelvin}
      *
-     * @param value temperature span in kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static TemperatureSpan kelvins(double value) {
         return new TemperatureSpan(value);
     }
 
     /**
-     * {@return a temperature span}
+     * {@return a temperature span in degrees Rankine, each as large as a degree Fahrenheit}
      *
-     * @param value temperature span in degrees Rankine, each as large as a degree Fahrenheit
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of degrees Rankine, each as large as a degree Fahrenheit
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static TemperatureSpan rankines(double value) {
-        return new TemperatureSpan(Units.RANKINE_SPAN.toSi(value));
+        return new TemperatureSpan(value, Units.RANKINE_SPAN);
     }
 
     /**
      * {@return a temperature span from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static TemperatureSpan of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +69,8 @@ public final class TemperatureSpan extends LinearQuantity<TemperatureSpan> {
      * {@return the temperature span that a text states, such as {@code "12.5 K"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static TemperatureSpan parse(String text) {
         return KIND.parse(text);

@@ -6,7 +6,7 @@ import javax.measure.Quantity;
 /**
  * A heat flux per temperature gradient.
  *
- * <p>SI unit W/(m K). Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit W/(m K). Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class ThermalConductivity extends LinearQuantity<ThermalConductivity> {
     private static final long serialVersionUID = 1L;
@@ -15,7 +15,10 @@ public final class ThermalConductivity extends LinearQuantity<ThermalConductivit
     public static final QuantityKind<ThermalConductivity, ThermalConductivity> KIND = QuantityKind.linear(
             "thermal conductivity",
             ThermalConductivity.class,
-            new Dimension(1, 1, -3, -1, 0, 0),
+            Dimension.MASS
+                    .times(Dimension.LENGTH)
+                    .dividedBy(Dimension.TEMPERATURE)
+                    .dividedBy(Dimension.TIME.pow(3)),
             ThermalConductivity::new,
             1,
             List.of(Units.WATT_PER_METRE_KELVIN, Units.MILLIWATT_PER_METRE_KELVIN));
@@ -24,31 +27,36 @@ public final class ThermalConductivity extends LinearQuantity<ThermalConductivit
         super(si, KIND);
     }
 
+    private ThermalConductivity(double value, Unit<ThermalConductivity> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a thermal conductivity}
+     * {@return a thermal conductivity in watts per metre and kelvin}
      *
-     * @param value thermal conductivity in watts per metre and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of watts per metre and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static ThermalConductivity wattsPerMetreKelvin(double value) {
         return new ThermalConductivity(value);
     }
 
     /**
-     * {@return a thermal conductivity}
+     * {@return a thermal conductivity in milliwatts per metre and kelvin}
      *
-     * @param value thermal conductivity in milliwatts per metre and kelvin
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of milliwatts per metre and kelvin
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static ThermalConductivity milliwattsPerMetreKelvin(double value) {
-        return new ThermalConductivity(Units.MILLIWATT_PER_METRE_KELVIN.toSi(value));
+        return new ThermalConductivity(value, Units.MILLIWATT_PER_METRE_KELVIN);
     }
 
     /**
      * {@return a thermal conductivity from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static ThermalConductivity of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +66,8 @@ public final class ThermalConductivity extends LinearQuantity<ThermalConductivit
      * {@return the thermal conductivity that a text states, such as {@code "12.5 W/(m K)"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static ThermalConductivity parse(String text) {
         return KIND.parse(text);

@@ -6,49 +6,49 @@ import javax.measure.Quantity;
 /**
  * A volume.
  *
- * <p>SI unit m³. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m³. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class Volume extends LinearQuantity<Volume> {
     private static final long serialVersionUID = 1L;
 
     /** Name, units, bounds and scale of this quantity. */
     public static final QuantityKind<Volume, Volume> KIND = QuantityKind.linear(
-            "volume",
-            Volume.class,
-            new Dimension(3, 0, 0, 0, 0, 0),
-            Volume::new,
-            1,
-            List.of(Units.CUBIC_METRE, Units.LITRE));
+            "volume", Volume.class, Dimension.LENGTH.pow(3), Volume::new, 1, List.of(Units.CUBIC_METRE, Units.LITRE));
 
     private Volume(double si) {
         super(si, KIND);
     }
 
+    private Volume(double value, Unit<Volume> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a volume}
+     * {@return a volume in cubic metres}
      *
-     * @param value volume in cubic metres
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic metres
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Volume cubicMetres(double value) {
         return new Volume(value);
     }
 
     /**
-     * {@return a volume}
+     * {@return a volume in litres}
      *
-     * @param value volume in litres
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of litres
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static Volume litres(double value) {
-        return new Volume(Units.LITRE.toSi(value));
+        return new Volume(value, Units.LITRE);
     }
 
     /**
      * {@return a volume from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Volume of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -58,7 +58,8 @@ public final class Volume extends LinearQuantity<Volume> {
      * {@return the volume that a text states, such as {@code "12.5 m³"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static Volume parse(String text) {
         return KIND.parse(text);
@@ -75,27 +76,27 @@ public final class Volume extends LinearQuantity<Volume> {
     }
 
     /**
-     * {@return the quotient with a mass}
+     * {@return this volume divided by a mass}
      *
      * @param mass the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public SpecificVolume over(Mass mass) {
         return SpecificVolume.cubicMetresPerKilogram(si() / mass.si());
     }
 
     /**
-     * {@return the quotient with a duration}
+     * {@return this volume divided by a duration}
      *
      * @param duration the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public VolumeFlow over(Duration duration) {
         return VolumeFlow.cubicMetresPerSecond(si() / duration.si());
     }
 
     /**
-     * {@return the product with a density}
+     * {@return this volume times a density}
      *
      * @param density the other factor
      */

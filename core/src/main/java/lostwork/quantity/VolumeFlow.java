@@ -6,84 +6,91 @@ import javax.measure.Quantity;
 /**
  * A volume per time, at the state that the fluid has. For a volume counted at a normal condition see {@link MolarFlow#normalCubicMetresPerHour}.
  *
- * <p>SI unit m³/s. Any finite value exists. Immutable and thread-safe.
+ * <p>SI unit m³/s. Any finite value exists; a difference may be negative. Immutable and thread-safe.
  */
 public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
     private static final long serialVersionUID = 1L;
 
     /** Name, units, bounds and scale of this quantity. */
     public static final QuantityKind<VolumeFlow, VolumeFlow> KIND = QuantityKind.linear(
-            "volume flow",
-            VolumeFlow.class,
-            new Dimension(3, 0, -1, 0, 0, 0),
-            VolumeFlow::new,
-            1,
-            List.of(
-                    Units.CUBIC_METRE_PER_SECOND,
-                    Units.CUBIC_METRE_PER_HOUR,
-                    Units.LITRE_PER_SECOND,
-                    Units.LITRE_PER_MINUTE,
-                    Units.CUBIC_FOOT_PER_MINUTE));
+                    "volume flow",
+                    VolumeFlow.class,
+                    Dimension.LENGTH.pow(3).dividedBy(Dimension.TIME),
+                    VolumeFlow::new,
+                    1,
+                    List.of(
+                            Units.CUBIC_METRE_PER_SECOND,
+                            Units.CUBIC_METRE_PER_HOUR,
+                            Units.LITRE_PER_SECOND,
+                            Units.LITRE_PER_MINUTE,
+                            Units.CUBIC_FOOT_PER_MINUTE,
+                            Units.US_GALLON_PER_MINUTE))
+            .withHints(NormalCondition.hints());
 
     private VolumeFlow(double si) {
         super(si, KIND);
     }
 
+    private VolumeFlow(double value, Unit<VolumeFlow> unit) {
+        super(value, unit, KIND);
+    }
+
     /**
-     * {@return a volume flow}
+     * {@return a volume flow in cubic metres per second}
      *
-     * @param value volume flow in cubic metres per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic metres per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static VolumeFlow cubicMetresPerSecond(double value) {
         return new VolumeFlow(value);
     }
 
     /**
-     * {@return a volume flow}
+     * {@return a volume flow in cubic metres per hour}
      *
-     * @param value volume flow in cubic metres per hour
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic metres per hour
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static VolumeFlow cubicMetresPerHour(double value) {
-        return new VolumeFlow(Units.CUBIC_METRE_PER_HOUR.toSi(value));
+        return new VolumeFlow(value, Units.CUBIC_METRE_PER_HOUR);
     }
 
     /**
-     * {@return a volume flow}
+     * {@return a volume flow in litres per second}
      *
-     * @param value volume flow in litres per second
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of litres per second
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static VolumeFlow litresPerSecond(double value) {
-        return new VolumeFlow(Units.LITRE_PER_SECOND.toSi(value));
+        return new VolumeFlow(value, Units.LITRE_PER_SECOND);
     }
 
     /**
-     * {@return a volume flow}
+     * {@return a volume flow in litres per minute}
      *
-     * @param value volume flow in litres per minute
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of litres per minute
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static VolumeFlow litresPerMinute(double value) {
-        return new VolumeFlow(Units.LITRE_PER_MINUTE.toSi(value));
+        return new VolumeFlow(value, Units.LITRE_PER_MINUTE);
     }
 
     /**
-     * {@return a volume flow}
+     * {@return a volume flow in cubic feet per minute}
      *
-     * @param value volume flow in cubic feet per minute
-     * @throws IllegalArgumentException if the value is NaN or infinite
+     * @param value the number of cubic feet per minute
+     * @throws OutOfRangeException if the value is NaN or infinite
      */
     public static VolumeFlow cubicFeetPerMinute(double value) {
-        return new VolumeFlow(Units.CUBIC_FOOT_PER_MINUTE.toSi(value));
+        return new VolumeFlow(value, Units.CUBIC_FOOT_PER_MINUTE);
     }
 
     /**
      * {@return a volume flow from a JSR-385 quantity in any unit of the same dimension}
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, or the value is not allowed
+     * @throws IllegalArgumentException if the dimension or the scale is another one; see {@link QuantityKind#of(Quantity)}
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static VolumeFlow of(Quantity<?> quantity) {
         return KIND.of(quantity);
@@ -93,7 +100,8 @@ public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
      * {@return the volume flow that a text states, such as {@code "12.5 m³/s"}}
      *
      * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
-     * @throws IllegalArgumentException if the text cannot be read as this quantity; the message lists what is accepted
+     * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
+     * @throws OutOfRangeException if the value is not allowed
      */
     public static VolumeFlow parse(String text) {
         return KIND.parse(text);
@@ -125,7 +133,7 @@ public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
     }
 
     /**
-     * {@return the product with a density}
+     * {@return this volume flow times a density}
      *
      * @param density the other factor
      */
@@ -134,27 +142,27 @@ public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
     }
 
     /**
-     * {@return the quotient with a specific volume}
+     * {@return this volume flow divided by a specific volume}
      *
      * @param specificVolume the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MassFlow over(SpecificVolume specificVolume) {
         return MassFlow.kilogramsPerSecond(si() / specificVolume.si());
     }
 
     /**
-     * {@return the quotient with a molar volume}
+     * {@return this volume flow divided by a molar volume}
      *
      * @param molarVolume the divisor, not zero
-     * @throws IllegalArgumentException if the quotient is not finite
+     * @throws OutOfRangeException if the divisor is zero
      */
     public MolarFlow over(MolarVolume molarVolume) {
         return MolarFlow.molesPerSecond(si() / molarVolume.si());
     }
 
     /**
-     * {@return the product with a pressure difference}
+     * {@return this volume flow times a pressure difference}
      *
      * @param pressureDifference the other factor
      */
@@ -163,7 +171,7 @@ public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
     }
 
     /**
-     * {@return the product with a duration}
+     * {@return this volume flow times a duration}
      *
      * @param duration the other factor
      */
