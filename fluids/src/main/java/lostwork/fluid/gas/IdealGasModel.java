@@ -1,0 +1,152 @@
+package lostwork.fluid.gas;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import lostwork.fluid.FluidModel;
+import lostwork.fluid.FluidRange;
+import lostwork.fluid.Phase;
+import lostwork.fluid.PhaseSide;
+import lostwork.fluid.Provenance;
+import lostwork.fluid.StatePoint;
+
+/** The primitive model of an ideal gas of fixed composition. */
+final class IdealGasModel implements FluidModel {
+    /** Molar gas constant, exact: 8.31446261815324 J/(mol K) (SI Brochure, 9th edition). */
+    static final double MOLAR_GAS_CONSTANT = 8.31446261815324;
+
+    /** Standard pressure of the data, 1 bar. */
+    static final double STANDARD_PRESSURE_PA = 1e5;
+
+    private static final double LOWEST_PRESSURE_PA = 1e-3;
+    private static final double HIGHEST_PRESSURE_PA = 1e8;
+    private static final String ENERGY_UNIT = "J/kg";
+    private static final String ENTROPY_UNIT = "J/(kg K)";
+
+    private final String name;
+    private final GasComposition composition;
+    private final double gasConstant;
+    private final CaloricCurve curve;
+    private final FluidRange range;
+    private final Provenance provenance;
+
+    IdealGasModel(String name, GasComposition composition, List<String> sources) {
+        this.name = name;
+        this.composition = composition;
+        final double molarMass = composition.molarMassKilogramPerMole();
+        gasConstant = MOLAR_GAS_CONSTANT / molarMass;
+        final int n = composition.species().size();
+        final List<CaloricCurve> curves = new ArrayList<>();
+        final double[] weights = new double[n];
+        double mixing = 0;
+        for (int i = 0; i < n; i++) {
+            final double x = composition.fraction(i);
+            curves.add(composition.species().get(i).curve());
+            weights[i] = x / molarMass;
+            mixing -= x * Math.log(x);
+        }
+        curve = CaloricCurve.sum(curves, weights, gasConstant * mixing);
+        range = new FluidRange(curve.lowest(), curve.highest(), LOWEST_PRESSURE_PA, HIGHEST_PRESSURE_PA, name);
+        provenance = provenance(sources);
+    }
+
+    private Provenance provenance(List<String> more) {
+        final List<String> sources = new ArrayList<>();
+        sources.add("McBride, Zehe, Gordon: NASA Glenn Coefficients for Calculating Thermodynamic Properties of"
+                + " Individual Species, NASA/TP-2002-211556, 2002");
+        for (Species species : composition.species()) {
+            sources.add(species.name() + ": " + species.origin());
+        }
+        sources.add("molar gas constant: SI Brochure, 9th edition, 2019");
+        sources.addAll(more);
+        return new Provenance(
+                "ideal gas, nine-coefficient polynomials: " + composition,
+                sources,
+                String.format(Locale.ROOT, "%.2f K to %.0f K", curve.lowest(), curve.highest()),
+                "none published with the coefficients; p v = R T neglects all forces between molecules, and no"
+                        + " condensation and no dissociation takes place",
+                "h: elements in their reference states at 298.15 K and 1 bar; s: absolute (third law)");
+    }
+
+    GasComposition composition() {
+        return composition;
+    }
+
+    CaloricCurve curve() {
+        return curve;
+    }
+
+    double gasConstant() {
+        return gasConstant;
+    }
+
+    @Override
+    public String name() {
+        return name;
+    }
+
+    @Override
+    public double molarMass() {
+        return composition.molarMassKilogramPerMole();
+    }
+
+    @Override
+    public FluidRange range() {
+        return range;
+    }
+
+    @Override
+    public Provenance provenance() {
+        return provenance;
+    }
+
+    @Override
+    public void evaluate(double temperature, double pressure, PhaseSide side, StatePoint out) {
+        final CaloricCurve.Segment segment = curve.at(temperature);
+        final double lnT = Math.log(temperature);
+        final double volumeByTemperature = gasConstant / pressure;
+        final double volume = volumeByTemperature * temperature;
+        out.setSinglePhase(
+                temperature,
+                pressure,
+                volume,
+                segment.enthalpy(temperature, lnT),
+                segment.entropy(temperature, lnT) - gasConstant * Math.log(pressure / STANDARD_PRESSURE_PA),
+                segment.heatCapacity(temperature),
+                volumeByTemperature,
+                -volume / pressure,
+                Phase.GAS);
+    }
+
+    @Override
+    public void atTemperaturePressure(double temperature, double pressure, StatePoint out) {
+        range.requireTemperature(temperature);
+        range.requirePressure(pressure);
+        evaluate(temperature, pressure, PhaseSide.VAPOUR, out);
+    }
+
+    @Override
+    public void atPressureEnthalpy(double pressure, double enthalpy, StatePoint out) {
+        range.requirePressure(pressure);
+        evaluate(temperatureAtEnthalpy(enthalpy), pressure, PhaseSide.VAPOUR, out);
+    }
+
+    @Override
+    public void atPressureEntropy(double pressure, double entropy, StatePoint out) {
+        range.requirePressure(pressure);
+        evaluate(temperatureAtEntropy(entropy, pressure), pressure, PhaseSide.VAPOUR, out);
+    }
+
+    double temperatureAtEnthalpy(double enthalpy) {
+        return curve.temperatureAtEnthalpy(enthalpy, 0, "enthalpy", ENERGY_UNIT, name);
+    }
+
+    double temperatureAtInternalEnergy(double internalEnergy) {
+        return curve.temperatureAtEnthalpy(internalEnergy, gasConstant, "internal energy", ENERGY_UNIT, name);
+    }
+
+    double temperatureAtEntropy(double entropy, double pressure) {
+        return curve.temperatureAtEntropy(
+                entropy + gasConstant * Math.log(pressure / STANDARD_PRESSURE_PA), ENTROPY_UNIT, name);
+    }
+}
