@@ -1,8 +1,10 @@
 package lostwork.fluid.gas;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import lostwork.quantity.OutOfRangeException;
+import lostwork.solve.ConvergenceException;
 
 /**
  * Heat capacity, enthalpy and entropy at standard pressure over temperature: the nine-coefficient form in its ranges,
@@ -81,7 +83,7 @@ final class CaloricCurve {
         final double from = low;
         final double to = high;
         final double[] limits = curves.stream()
-                .flatMapToDouble(curve -> java.util.Arrays.stream(curve.limits))
+                .flatMapToDouble(curve -> Arrays.stream(curve.limits))
                 .filter(t -> t >= from && t <= to)
                 .sorted()
                 .distinct()
@@ -184,22 +186,31 @@ final class CaloricCurve {
                 t = middle;
             }
         }
-        throw notFound(name, wanted, unit, limitedBy);
+        final double left = segment.enthalpy(t, Math.log(t)) - slope * t - wanted;
+        throw notFound(name, wanted, unit, limitedBy, t, left);
     }
 
-    /** {@return the temperature in K at which the entropy at standard pressure has a value} */
-    double temperatureAtEntropy(double wanted, String unit, String limitedBy) {
-        final double least = entropy(limits[0]);
-        final double most = entropy(highest());
+    /**
+     * {@return the temperature in K at which the entropy at standard pressure, less a multiple of ln T, has a value}
+     *
+     * @param wanted the value, in the curve's entropy unit
+     * @param slope the multiple: 0 where the pressure is fixed, the gas constant where the volume is
+     * @param name what the value is called, for the message
+     * @param unit its unit, for the message
+     * @param limitedBy whose range it is, for the message
+     */
+    double temperatureAtEntropy(double wanted, double slope, String name, String unit, String limitedBy) {
+        final double least = entropy(limits[0]) - slope * Math.log(limits[0]);
+        final double most = entropy(highest()) - slope * Math.log(highest());
         if (!(wanted >= least && wanted <= most)) {
-            throw outside("entropy at the standard pressure", wanted, least, most, unit, limitedBy);
+            throw outside(name, wanted, least, most, unit, limitedBy);
         }
         int i = 0;
         double below = least;
         double above = most;
         while (i < segments.length - 1) {
-            final double joint = limits[i + 1];
-            above = segments[i].entropy(joint, Math.log(joint));
+            final double ln = Math.log(limits[i + 1]);
+            above = segments[i].entropy(limits[i + 1], ln) - slope * ln;
             if (wanted <= above) {
                 break;
             }
@@ -214,7 +225,8 @@ final class CaloricCurve {
         double t = low * Math.exp(Math.log(high / low) * (wanted - below) / (above - below));
         t = Math.min(Math.max(t, low), high);
         for (int step = 0; step < STEP_LIMIT; step++) {
-            final double excess = segment.entropy(t, Math.log(t)) - wanted;
+            final double ln = Math.log(t);
+            final double excess = segment.entropy(t, ln) - slope * ln - wanted;
             if (excess == 0) {
                 return t;
             }
@@ -223,7 +235,7 @@ final class CaloricCurve {
             } else {
                 high = t;
             }
-            final double logStep = -excess / segment.heatCapacity(t);
+            final double logStep = -excess / (segment.heatCapacity(t) - slope);
             final double newton = t * Math.exp(logStep);
             if (newton >= low && newton <= high) {
                 if (Math.abs(logStep) <= LAST_STEP) {
@@ -238,7 +250,8 @@ final class CaloricCurve {
                 t = middle;
             }
         }
-        throw notFound("entropy at the standard pressure", wanted, unit, limitedBy);
+        final double ln = Math.log(t);
+        throw notFound(name, wanted, unit, limitedBy, t, segment.entropy(t, ln) - slope * ln - wanted);
     }
 
     private OutOfRangeException outside(
@@ -253,15 +266,15 @@ final class CaloricCurve {
                 String.format(Locale.ROOT, "these are its values at %s K and %s K", lowest(), highest()));
     }
 
-    private static IllegalStateException notFound(String name, double wanted, String unit, String limitedBy) {
-        return new IllegalStateException(String.format(
-                Locale.ROOT,
-                "no temperature found for %s = %s %s of %s within %d steps; report it with these numbers",
-                name,
-                wanted,
-                unit,
-                limitedBy,
-                STEP_LIMIT));
+    private static ConvergenceException notFound(
+            String name, double wanted, String unit, String limitedBy, double best, double residual) {
+        return new ConvergenceException(
+                String.format(Locale.ROOT, "temperature of %s at %s = %s %s", limitedBy, name, wanted, unit),
+                STEP_LIMIT,
+                best,
+                residual,
+                "the bracket did not close",
+                "report it with these numbers");
     }
 
     /** One range: cp = a1/T² + a2/T + a3 + a4 T + a5 T² + a6 T³ + a7 T⁴ and its two integrals. */

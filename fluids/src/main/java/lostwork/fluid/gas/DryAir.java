@@ -1,6 +1,6 @@
 package lostwork.fluid.gas;
 
-import java.util.List;
+import lostwork.fluid.Provenance;
 
 /**
  * Dry air as an ideal gas mixture: nitrogen 78.084, oxygen 20.9476, argon 0.9365, carbon dioxide 0.0319 mole percent.
@@ -16,7 +16,9 @@ public final class DryAir extends IdealGas {
 
     private DryAir(GasComposition composition) {
         super(new IdealGasModel(
-                "dry air", composition, List.of("composition of dry air: NASA/TP-2002-211556, species Air")));
+                "dry air",
+                composition,
+                new Provenance.Source("composition: species Air of NASA/TP-2002-211556", "from memory")));
     }
 
     /** {@return dry air of the standard composition} */

@@ -2,6 +2,7 @@ package lostwork.fluid.gas;
 
 import java.util.List;
 import java.util.Locale;
+import lostwork.fluid.Provenance;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Pressure;
 import lostwork.quantity.Ratio;
@@ -36,7 +37,7 @@ public final class FlueGas extends IdealGas {
         super(new IdealGasModel(
                 String.format(Locale.ROOT, "flue gas of %s, excess air %.1f %%", fuel.name(), 100 * excess),
                 composition,
-                List.of("complete combustion by the balance of elements")));
+                new Provenance.Source("composition: complete combustion", "computed by the balance of elements")));
         this.fuel = fuel;
         this.air = air;
         this.excess = excess;

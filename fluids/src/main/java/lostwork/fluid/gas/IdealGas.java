@@ -1,6 +1,5 @@
 package lostwork.fluid.gas;
 
-import java.util.List;
 import lostwork.fluid.Fluid;
 import lostwork.quantity.MolarEnergy;
 import lostwork.quantity.MolarEntropy;
@@ -68,7 +67,7 @@ public sealed class IdealGas extends Fluid permits DryAir, FlueGas {
      * @param composition the composition
      */
     public static IdealGas of(String name, GasComposition composition) {
-        return new IdealGas(new IdealGasModel(name, composition, List.of()));
+        return new IdealGas(new IdealGasModel(name, composition));
     }
 
     /** {@return the composition} */

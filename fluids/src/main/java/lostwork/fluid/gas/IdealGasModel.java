@@ -30,7 +30,7 @@ final class IdealGasModel implements FluidModel {
     private final FluidRange range;
     private final Provenance provenance;
 
-    IdealGasModel(String name, GasComposition composition, List<String> sources) {
+    IdealGasModel(String name, GasComposition composition, Provenance.Source... sources) {
         this.name = name;
         this.composition = composition;
         final double molarMass = composition.molarMassKilogramPerMole();
@@ -47,25 +47,29 @@ final class IdealGasModel implements FluidModel {
         }
         curve = CaloricCurve.sum(curves, weights, gasConstant * mixing);
         range = new FluidRange(curve.lowest(), curve.highest(), LOWEST_PRESSURE_PA, HIGHEST_PRESSURE_PA, name);
-        provenance = provenance(sources);
+        provenance = provenance(composition, curve, List.of(sources));
     }
 
-    private Provenance provenance(List<String> more) {
-        final List<String> sources = new ArrayList<>();
-        sources.add("McBride, Zehe, Gordon: NASA Glenn Coefficients for Calculating Thermodynamic Properties of"
-                + " Individual Species, NASA/TP-2002-211556, 2002");
+    private static Provenance provenance(
+            GasComposition composition, CaloricCurve curve, List<Provenance.Source> moreSources) {
+        Provenance provenance = Provenance.of("ideal gas, nine-coefficient polynomials: " + composition)
+                .withSource(
+                        "McBride, B.J., Zehe, M.J., Gordon, S.: NASA Glenn Coefficients for Calculating Thermodynamic"
+                                + " Properties of Individual Species, NASA/TP-2002-211556, 2002",
+                        "see each species");
         for (Species species : composition.species()) {
-            sources.add(species.name() + ": " + species.origin());
+            provenance = provenance.withSource(species.name(), species.origin());
         }
-        sources.add("molar gas constant: SI Brochure, 9th edition, 2019");
-        sources.addAll(more);
-        return new Provenance(
-                "ideal gas, nine-coefficient polynomials: " + composition,
-                sources,
-                String.format(Locale.ROOT, "%.2f K to %.0f K", curve.lowest(), curve.highest()),
-                "none published with the coefficients; p v = R T neglects all forces between molecules, and no"
-                        + " condensation and no dissociation takes place",
-                "h: elements in their reference states at 298.15 K and 1 bar; s: absolute (third law)");
+        provenance = provenance.withSource("molar gas constant: SI Brochure, 9th edition, 2019", "from memory, exact");
+        for (Provenance.Source source : moreSources) {
+            provenance = provenance.withSource(source.citation(), source.origin());
+        }
+        return provenance
+                .withRange(String.format(Locale.ROOT, "%.2f K to %.0f K, low density", curve.lowest(), curve.highest()))
+                .withUncertainty("none published with the coefficients")
+                .withDatum("h: elements in their reference states at 298.15 K and 1 bar; s: absolute (third law)")
+                .withReservation("p v = R T neglects the forces between molecules")
+                .withReservation("nothing condenses and nothing dissociates");
     }
 
     GasComposition composition() {
@@ -137,6 +141,47 @@ final class IdealGasModel implements FluidModel {
         evaluate(temperatureAtEntropy(entropy, pressure), pressure, PhaseSide.VAPOUR, out);
     }
 
+    @Override
+    public void atPressureVolume(double pressure, double volume, StatePoint out) {
+        atTemperaturePressure(pressure * volume / gasConstant, pressure, out);
+    }
+
+    @Override
+    public void atTemperatureVolume(double temperature, double volume, StatePoint out) {
+        atTemperaturePressure(temperature, gasConstant * temperature / volume, out);
+    }
+
+    @Override
+    public void atTemperatureEntropy(double temperature, double entropy, StatePoint out) {
+        range.requireTemperature(temperature);
+        atTemperaturePressure(temperature, pressureAt(temperature, entropy), out);
+    }
+
+    @Override
+    public void atEnthalpyEntropy(double enthalpy, double entropy, StatePoint out) {
+        final double temperature = temperatureAtEnthalpy(enthalpy);
+        atTemperaturePressure(temperature, pressureAt(temperature, entropy), out);
+    }
+
+    @Override
+    public void atInternalEnergyVolume(double internalEnergy, double volume, StatePoint out) {
+        atTemperatureVolume(temperatureAtInternalEnergy(internalEnergy), volume, out);
+    }
+
+    @Override
+    public void atEntropyVolume(double entropy, double volume, StatePoint out) {
+        // s = s°(T) - R ln(R T/(v p°))
+        final double wanted = entropy + gasConstant * Math.log(gasConstant / (volume * STANDARD_PRESSURE_PA));
+        atTemperatureVolume(
+                curve.temperatureAtEntropy(wanted, gasConstant, "entropy less R ln T", ENTROPY_UNIT, name),
+                volume,
+                out);
+    }
+
+    private double pressureAt(double temperature, double entropy) {
+        return STANDARD_PRESSURE_PA * Math.exp((curve.entropy(temperature) - entropy) / gasConstant);
+    }
+
     double temperatureAtEnthalpy(double enthalpy) {
         return curve.temperatureAtEnthalpy(enthalpy, 0, "enthalpy", ENERGY_UNIT, name);
     }
@@ -147,6 +192,10 @@ final class IdealGasModel implements FluidModel {
 
     double temperatureAtEntropy(double entropy, double pressure) {
         return curve.temperatureAtEntropy(
-                entropy + gasConstant * Math.log(pressure / STANDARD_PRESSURE_PA), ENTROPY_UNIT, name);
+                entropy + gasConstant * Math.log(pressure / STANDARD_PRESSURE_PA),
+                0,
+                "entropy at 1 bar",
+                ENTROPY_UNIT,
+                name);
     }
 }

@@ -1,6 +1,7 @@
 package lostwork.fluid.gas;
 
 import lostwork.quantity.OutOfRangeException;
+import lostwork.solve.BracketedRoot;
 
 /**
  * Pressure at which pure water vapour is in equilibrium with liquid water or ice, over temperature.
@@ -25,7 +26,7 @@ final class WaterVapourPressure {
     private static final double CRITICAL_PRESSURE_PA = 22.064e6;
     private static final double TRIPLE_TEMPERATURE_K = 273.16;
     private static final double TRIPLE_PRESSURE_PA = 611.657;
-    private static final int STEP_LIMIT = 200;
+    private static final BracketedRoot ROOTS = BracketedRoot.limitedTo(200);
 
     private WaterVapourPressure() {}
 
@@ -62,11 +63,7 @@ final class WaterVapourPressure {
         return TRIPLE_PRESSURE_PA * Math.exp(sum / theta);
     }
 
-    /**
-     * {@return the temperature in K at which the equilibrium pressure has a value in Pa}
-     *
-     * <p>Newton's steps in ln p over 1/T, where the curve is nearly straight, inside a bracket that each step shrinks.
-     */
+    /** {@return the temperature in K at which the equilibrium pressure has a value in Pa} */
     static double temperature(double pressure) {
         final double least = pascal(LOWEST_TEMPERATURE_K);
         if (!(pressure >= least && pressure <= CRITICAL_PRESSURE_PA)) {
@@ -80,29 +77,10 @@ final class WaterVapourPressure {
                     "a dew point exists between these limits only");
         }
         final double wanted = Math.log(pressure);
-        double low = LOWEST_TEMPERATURE_K;
-        double high = CRITICAL_TEMPERATURE_K;
-        double t = 1
-                / (1 / low
-                        + (1 / high - 1 / low) * (wanted - Math.log(least)) / Math.log(CRITICAL_PRESSURE_PA / least));
-        for (int step = 0; step < STEP_LIMIT; step++) {
-            t = t >= low && t <= high ? t : 0.5 * (low + high);
-            final double excess = Math.log(pascal(t)) - wanted;
-            if (excess < 0) {
-                low = t;
-            } else {
-                high = t;
-            }
-            // The slope of the straight line through this point and one 0.01 % away, on the side that exists.
-            final double near = t * (t > 400 ? 0.9999 : 1.0001);
-            final double slope = (Math.log(pascal(near)) - wanted - excess) / (1 / near - 1 / t);
-            final double next = 1 / (1 / t - excess / slope);
-            if (Math.abs(next - t) <= 1e-13 * t || high - low <= 1e-15 * high) {
-                return Math.min(Math.max(next, LOWEST_TEMPERATURE_K), CRITICAL_TEMPERATURE_K);
-            }
-            t = next;
-        }
-        throw new IllegalStateException("no dew point found for a partial pressure of water of " + pressure
-                + " Pa; report it with this number");
+        return ROOTS.solve(
+                "dew point of water at " + pressure + " Pa",
+                temperature -> Math.log(pascal(temperature)) - wanted,
+                LOWEST_TEMPERATURE_K,
+                CRITICAL_TEMPERATURE_K);
     }
 }
