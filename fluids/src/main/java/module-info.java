@@ -5,4 +5,5 @@ module lostwork.fluids {
 
     exports lostwork.fluid;
     exports lostwork.fluid.gas;
+    exports lostwork.fluid.water;
 }

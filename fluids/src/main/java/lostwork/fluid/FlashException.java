@@ -22,7 +22,16 @@ public final class FlashException extends RuntimeException {
     /** The number of evaluations. */
     private final int iterations;
 
-    FlashException(String fluid, String search, double residual, int iterations, String wayOut) {
+    /**
+     * Creates the exception.
+     *
+     * @param fluid the name of the fluid
+     * @param search what was asked for, in words and SI units
+     * @param residual the distance from the value asked for that was left, relative
+     * @param iterations how many iterations were made
+     * @param wayOut what the caller can do, as a clause
+     */
+    public FlashException(String fluid, String search, double residual, int iterations, String wayOut) {
         super(String.format(
                 Locale.ROOT,
                 "%s: no state with %s; after %d iterations the relative distance is %.3g; %s",
