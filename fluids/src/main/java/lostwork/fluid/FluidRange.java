@@ -17,6 +17,10 @@ public record FluidRange(
         double lowestPressure,
         double highestPressure,
         String limitedBy) {
+    /** What the message of a refusal offers. */
+    static final String WAY_OUT =
+            "no extrapolation is offered; take a state inside the range or a fluid whose model holds there";
+
     /**
      * {@return whether a temperature and a pressure lie within the range}
      *
@@ -39,7 +43,7 @@ public record FluidRange(
     public void requireTemperature(double temperature) {
         if (!(temperature >= lowestTemperature && temperature <= highestTemperature)) {
             throw new OutOfRangeException(
-                    "temperature", temperature, lowestTemperature, highestTemperature, "K", limitedBy, "");
+                    "temperature", temperature, lowestTemperature, highestTemperature, "K", limitedBy, WAY_OUT);
         }
     }
 
@@ -51,7 +55,8 @@ public record FluidRange(
      */
     public void requirePressure(double pressure) {
         if (!(pressure >= lowestPressure && pressure <= highestPressure)) {
-            throw new OutOfRangeException("pressure", pressure, lowestPressure, highestPressure, "Pa", limitedBy, "");
+            throw new OutOfRangeException(
+                    "pressure", pressure, lowestPressure, highestPressure, "Pa", limitedBy, WAY_OUT);
         }
     }
 }

@@ -8,6 +8,11 @@ public interface SaturationModel {
     /** {@return the lowest temperature of the saturation line in K, usually the triple point} */
     double lowestTemperature();
 
+    /** {@return the saturation pressure at the lowest temperature in Pa; a model that knows the number overrides this} */
+    default double lowestPressure() {
+        return pressure(lowestTemperature());
+    }
+
     /** {@return the critical temperature in K} */
     double criticalTemperature();
 

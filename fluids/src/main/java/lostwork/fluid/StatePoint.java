@@ -49,6 +49,8 @@ public final class StatePoint {
 
     private @Nullable StatePoint liquidSide;
     private @Nullable StatePoint vapourSide;
+    private @Nullable BracketedNewton innerSearch;
+    private @Nullable BracketedNewton outerSearch;
 
     /** Creates an empty point. */
     public StatePoint() {}
@@ -79,6 +81,34 @@ public final class StatePoint {
             vapourSide = side;
         }
         return side;
+    }
+
+    /** Lets go of the work areas, in a point that is kept for its values only. */
+    void dropWorkAreas() {
+        liquidSide = null;
+        vapourSide = null;
+        innerSearch = null;
+        outerSearch = null;
+    }
+
+    /** {@return the search along one line, made on the first call and kept} */
+    BracketedNewton innerSearch() {
+        BracketedNewton search = innerSearch;
+        if (search == null) {
+            search = new BracketedNewton();
+            innerSearch = search;
+        }
+        return search;
+    }
+
+    /** {@return the search that holds another one inside, made on the first call and kept} */
+    BracketedNewton outerSearch() {
+        BracketedNewton search = outerSearch;
+        if (search == null) {
+            search = new BracketedNewton();
+            outerSearch = search;
+        }
+        return search;
     }
 
     /**
