@@ -33,7 +33,7 @@ import lostwork.quantity.Temperature;
  *
  * <p>Immutable and thread-safe.
  */
-public sealed class IdealGas extends Fluid permits DryAir, FlueGas {
+public sealed class IdealGas extends Fluid permits DryAir, HumidAir, FlueGas {
     private final IdealGasModel model;
 
     IdealGas(IdealGasModel model) {

@@ -47,25 +47,29 @@ final class IdealGasModel implements FluidModel {
         }
         curve = CaloricCurve.sum(curves, weights, gasConstant * mixing);
         range = new FluidRange(curve.lowest(), curve.highest(), LOWEST_PRESSURE_PA, HIGHEST_PRESSURE_PA, name);
-        provenance = provenance(composition, curve, List.of(sources));
+        provenance = provenance(composition.toString(), composition.species(), range, sources);
     }
 
-    private static Provenance provenance(
-            GasComposition composition, CaloricCurve curve, List<Provenance.Source> moreSources) {
+    static Provenance provenance(
+            String composition, List<Species> species, FluidRange range, Provenance.Source... moreSources) {
         Provenance provenance = Provenance.of("ideal gas, nine-coefficient polynomials: " + composition)
                 .withSource(
                         "McBride, B.J., Zehe, M.J., Gordon, S.: NASA Glenn Coefficients for Calculating Thermodynamic"
                                 + " Properties of Individual Species, NASA/TP-2002-211556, 2002",
                         "see each species");
-        for (Species species : composition.species()) {
-            provenance = provenance.withSource(species.name(), species.origin());
+        for (Species one : species) {
+            provenance = provenance.withSource(one.name(), one.origin());
         }
         provenance = provenance.withSource("molar gas constant: SI Brochure, 9th edition, 2019", "from memory, exact");
         for (Provenance.Source source : moreSources) {
             provenance = provenance.withSource(source.citation(), source.origin());
         }
         return provenance
-                .withRange(String.format(Locale.ROOT, "%.2f K to %.0f K, low density", curve.lowest(), curve.highest()))
+                .withRange(String.format(
+                        Locale.ROOT,
+                        "%.2f K to %.0f K, low density",
+                        range.lowestTemperature(),
+                        range.highestTemperature()))
                 .withUncertainty("none published with the coefficients")
                 .withDatum("h: elements in their reference states at 298.15 K and 1 bar; s: absolute (third law)")
                 .withReservation("p v = R T neglects the forces between molecules")
