@@ -1,0 +1,11 @@
+package lostwork.fluid;
+
+/** A fluid with a critical point, a compressible liquid and a compressible vapour through the generic searches. */
+class VanDerWaalsFluidTest extends FluidContract {
+    private final Fluid fluid = Fluid.of(new VanDerWaalsFluid());
+
+    @Override
+    protected Fluid fluid() {
+        return fluid;
+    }
+}
