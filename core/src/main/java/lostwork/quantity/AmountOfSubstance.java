@@ -108,6 +108,34 @@ public final class AmountOfSubstance extends LinearQuantity<AmountOfSubstance> {
         return MolarFlow.molesPerSecond(si() / duration.si());
     }
 
+    /**
+     * {@return this amount of substance times a molar entropy}
+     *
+     * @param molarEntropy the other factor
+     */
+    public Entropy times(MolarEntropy molarEntropy) {
+        return Entropy.joulesPerKelvin(si() * molarEntropy.si());
+    }
+
+    /**
+     * {@return this amount of substance times a molar volume}
+     *
+     * @param molarVolume the other factor
+     */
+    public Volume times(MolarVolume molarVolume) {
+        return Volume.cubicMetres(si() * molarVolume.si());
+    }
+
+    /**
+     * {@return this amount of substance divided by a molar flow}
+     *
+     * @param molarFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(MolarFlow molarFlow) {
+        return Duration.seconds(si() / molarFlow.si());
+    }
+
     @Override
     public QuantityKind<AmountOfSubstance, AmountOfSubstance> kind() {
         return KIND;

@@ -111,6 +111,16 @@ public final class Area extends LinearQuantity<Area> {
         return Volume.cubicMetres(si() * length.si());
     }
 
+    /**
+     * {@return this area divided by a length}
+     *
+     * @param length the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Length over(Length length) {
+        return Length.metres(si() / length.si());
+    }
+
     @Override
     public QuantityKind<Area, Area> kind() {
         return KIND;

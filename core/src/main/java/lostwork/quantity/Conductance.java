@@ -112,6 +112,16 @@ public final class Conductance extends LinearQuantity<Conductance> {
         return Area.squareMetres(si() / heatTransferCoefficient.si());
     }
 
+    /**
+     * {@return this thermal conductance divided by a heat capacity rate: the number of transfer units}
+     *
+     * @param heatCapacityRate the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Ratio over(HeatCapacityRate heatCapacityRate) {
+        return Ratio.fraction(si() / heatCapacityRate.si());
+    }
+
     @Override
     public QuantityKind<Conductance, Conductance> kind() {
         return KIND;

@@ -122,6 +122,15 @@ public final class Density extends LinearQuantity<Density> {
         return SpecificVolume.cubicMetresPerKilogram(1 / si());
     }
 
+    /**
+     * {@return this density times a specific energy}
+     *
+     * @param specificEnergy the other factor
+     */
+    public PressureDifference times(SpecificEnergy specificEnergy) {
+        return PressureDifference.pascals(si() * specificEnergy.si());
+    }
+
     @Override
     public QuantityKind<Density, Density> kind() {
         return KIND;

@@ -161,6 +161,33 @@ public final class Duration extends LinearQuantity<Duration> {
         return Volume.cubicMetres(si() * volumeFlow.si());
     }
 
+    /**
+     * {@return this duration times an entropy rate}
+     *
+     * @param entropyRate the other factor
+     */
+    public Entropy times(EntropyRate entropyRate) {
+        return Entropy.joulesPerKelvin(si() * entropyRate.si());
+    }
+
+    /**
+     * {@return this duration times a molar flow}
+     *
+     * @param molarFlow the other factor
+     */
+    public AmountOfSubstance times(MolarFlow molarFlow) {
+        return AmountOfSubstance.moles(si() * molarFlow.si());
+    }
+
+    /**
+     * {@return this duration times a speed}
+     *
+     * @param speed the other factor
+     */
+    public Length times(Speed speed) {
+        return Length.metres(si() * speed.si());
+    }
+
     @Override
     public QuantityKind<Duration, Duration> kind() {
         return KIND;

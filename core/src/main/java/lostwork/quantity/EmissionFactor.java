@@ -113,6 +113,15 @@ public final class EmissionFactor extends LinearQuantity<EmissionFactor> {
         return MassFlow.kilogramsPerSecond(si() * power.si());
     }
 
+    /**
+     * {@return this emission factor times a mass price}
+     *
+     * @param massPrice the other factor
+     */
+    public EnergyPrice times(MassPrice massPrice) {
+        return EnergyPrice.perJoule(si() * massPrice.si());
+    }
+
     @Override
     public QuantityKind<EmissionFactor, EmissionFactor> kind() {
         return KIND;

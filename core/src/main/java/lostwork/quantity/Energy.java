@@ -226,6 +226,66 @@ public final class Energy extends LinearQuantity<Energy> {
         return Mass.kilograms(si() * emissionFactor.si());
     }
 
+    /**
+     * {@return this energy divided by an entropy: the mean temperature at which heat carries that entropy}
+     *
+     * @param entropy the divisor, not zero
+     * @throws OutOfRangeException if the quotient is no temperature above 0 K, or the divisor is zero
+     */
+    public Temperature over(Entropy entropy) {
+        return Temperature.kelvin(si() / entropy.si());
+    }
+
+    /**
+     * {@return this energy divided by a molar energy}
+     *
+     * @param molarEnergy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public AmountOfSubstance over(MolarEnergy molarEnergy) {
+        return AmountOfSubstance.moles(si() / molarEnergy.si());
+    }
+
+    /**
+     * {@return this energy divided by a power}
+     *
+     * @param power the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(Power power) {
+        return Duration.seconds(si() / power.si());
+    }
+
+    /**
+     * {@return this energy divided by a pressure difference}
+     *
+     * @param pressureDifference the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Volume over(PressureDifference pressureDifference) {
+        return Volume.cubicMetres(si() / pressureDifference.si());
+    }
+
+    /**
+     * {@return this energy divided by a specific energy}
+     *
+     * @param specificEnergy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Mass over(SpecificEnergy specificEnergy) {
+        return Mass.kilograms(si() / specificEnergy.si());
+    }
+
+    /**
+     * {@return this energy divided by a volume}
+     *
+     * @param volume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public PressureDifference over(Volume volume) {
+        return PressureDifference.pascals(si() / volume.si());
+    }
+
     @Override
     public QuantityKind<Energy, Energy> kind() {
         return KIND;

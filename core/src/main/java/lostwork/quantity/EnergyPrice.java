@@ -123,6 +123,35 @@ public final class EnergyPrice extends LinearQuantity<EnergyPrice> {
         return MoneyRate.perSecond(si() * power.si());
     }
 
+    /**
+     * {@return this energy price times a specific energy}
+     *
+     * @param specificEnergy the other factor
+     */
+    public MassPrice times(SpecificEnergy specificEnergy) {
+        return MassPrice.perKilogram(si() * specificEnergy.si());
+    }
+
+    /**
+     * {@return this energy price divided by an emission factor}
+     *
+     * @param emissionFactor the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MassPrice over(EmissionFactor emissionFactor) {
+        return MassPrice.perKilogram(si() / emissionFactor.si());
+    }
+
+    /**
+     * {@return this energy price divided by a mass price}
+     *
+     * @param massPrice the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public EmissionFactor over(MassPrice massPrice) {
+        return EmissionFactor.kilogramsPerJoule(si() / massPrice.si());
+    }
+
     @Override
     public QuantityKind<EnergyPrice, EnergyPrice> kind() {
         return KIND;

@@ -122,6 +122,46 @@ public final class Entropy extends LinearQuantity<Entropy> {
         return new Entropy(heat.si() / temperature.si());
     }
 
+    /**
+     * {@return this entropy divided by an amount of substance}
+     *
+     * @param amountOfSubstance the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarEntropy over(AmountOfSubstance amountOfSubstance) {
+        return MolarEntropy.joulesPerMoleKelvin(si() / amountOfSubstance.si());
+    }
+
+    /**
+     * {@return this entropy divided by an entropy rate}
+     *
+     * @param entropyRate the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(EntropyRate entropyRate) {
+        return Duration.seconds(si() / entropyRate.si());
+    }
+
+    /**
+     * {@return this entropy divided by a molar entropy}
+     *
+     * @param molarEntropy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public AmountOfSubstance over(MolarEntropy molarEntropy) {
+        return AmountOfSubstance.moles(si() / molarEntropy.si());
+    }
+
+    /**
+     * {@return this entropy divided by a specific entropy}
+     *
+     * @param specificEntropy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Mass over(SpecificEntropy specificEntropy) {
+        return Mass.kilograms(si() / specificEntropy.si());
+    }
+
     @Override
     public QuantityKind<Entropy, Entropy> kind() {
         return KIND;

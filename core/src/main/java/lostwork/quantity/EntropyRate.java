@@ -121,6 +121,36 @@ public final class EntropyRate extends LinearQuantity<EntropyRate> {
         return new EntropyRate(heat.si() / temperature.si());
     }
 
+    /**
+     * {@return this entropy rate divided by a molar entropy}
+     *
+     * @param molarEntropy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarFlow over(MolarEntropy molarEntropy) {
+        return MolarFlow.molesPerSecond(si() / molarEntropy.si());
+    }
+
+    /**
+     * {@return this entropy rate divided by a molar flow}
+     *
+     * @param molarFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarEntropy over(MolarFlow molarFlow) {
+        return MolarEntropy.joulesPerMoleKelvin(si() / molarFlow.si());
+    }
+
+    /**
+     * {@return this entropy rate divided by a specific entropy}
+     *
+     * @param specificEntropy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MassFlow over(SpecificEntropy specificEntropy) {
+        return MassFlow.kilogramsPerSecond(si() / specificEntropy.si());
+    }
+
     @Override
     public QuantityKind<EntropyRate, EntropyRate> kind() {
         return KIND;

@@ -92,6 +92,46 @@ public final class HeatCapacityRate extends LinearQuantity<HeatCapacityRate> {
         return Power.watts(si() * temperatureSpan.si());
     }
 
+    /**
+     * {@return this heat capacity rate divided by a mass flow}
+     *
+     * @param massFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public SpecificHeatCapacity over(MassFlow massFlow) {
+        return SpecificHeatCapacity.joulesPerKilogramKelvin(si() / massFlow.si());
+    }
+
+    /**
+     * {@return this heat capacity rate divided by a molar flow}
+     *
+     * @param molarFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarHeatCapacity over(MolarFlow molarFlow) {
+        return MolarHeatCapacity.joulesPerMoleKelvin(si() / molarFlow.si());
+    }
+
+    /**
+     * {@return this heat capacity rate divided by a molar heat capacity}
+     *
+     * @param molarHeatCapacity the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarFlow over(MolarHeatCapacity molarHeatCapacity) {
+        return MolarFlow.molesPerSecond(si() / molarHeatCapacity.si());
+    }
+
+    /**
+     * {@return this heat capacity rate divided by a specific heat capacity}
+     *
+     * @param specificHeatCapacity the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MassFlow over(SpecificHeatCapacity specificHeatCapacity) {
+        return MassFlow.kilogramsPerSecond(si() / specificHeatCapacity.si());
+    }
+
     @Override
     public QuantityKind<HeatCapacityRate, HeatCapacityRate> kind() {
         return KIND;

@@ -99,6 +99,16 @@ public final class HeatFlux extends LinearQuantity<HeatFlux> {
         return HeatTransferCoefficient.wattsPerSquareMetreKelvin(si() / temperatureSpan.si());
     }
 
+    /**
+     * {@return this heat flux divided by a heat transfer coefficient}
+     *
+     * @param heatTransferCoefficient the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public TemperatureSpan over(HeatTransferCoefficient heatTransferCoefficient) {
+        return TemperatureSpan.kelvins(si() / heatTransferCoefficient.si());
+    }
+
     @Override
     public QuantityKind<HeatFlux, HeatFlux> kind() {
         return KIND;

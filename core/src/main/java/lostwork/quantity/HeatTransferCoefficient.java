@@ -83,6 +83,15 @@ public final class HeatTransferCoefficient extends LinearQuantity<HeatTransferCo
         return HeatFlux.wattsPerSquareMetre(si() * temperatureSpan.si());
     }
 
+    /**
+     * {@return this heat transfer coefficient times a length}
+     *
+     * @param length the other factor
+     */
+    public ThermalConductivity times(Length length) {
+        return ThermalConductivity.wattsPerMetreKelvin(si() * length.si());
+    }
+
     @Override
     public QuantityKind<HeatTransferCoefficient, HeatTransferCoefficient> kind() {
         return KIND;

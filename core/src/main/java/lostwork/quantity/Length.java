@@ -119,6 +119,44 @@ public final class Length extends LinearQuantity<Length> {
         return Area.squareMetres(si() * length.si());
     }
 
+    /**
+     * {@return this length times an area}
+     *
+     * @param area the other factor
+     */
+    public Volume times(Area area) {
+        return Volume.cubicMetres(si() * area.si());
+    }
+
+    /**
+     * {@return this length times a heat transfer coefficient}
+     *
+     * @param heatTransferCoefficient the other factor
+     */
+    public ThermalConductivity times(HeatTransferCoefficient heatTransferCoefficient) {
+        return ThermalConductivity.wattsPerMetreKelvin(si() * heatTransferCoefficient.si());
+    }
+
+    /**
+     * {@return this length divided by a duration}
+     *
+     * @param duration the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Speed over(Duration duration) {
+        return Speed.metresPerSecond(si() / duration.si());
+    }
+
+    /**
+     * {@return this length divided by a speed}
+     *
+     * @param speed the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(Speed speed) {
+        return Duration.seconds(si() / speed.si());
+    }
+
     @Override
     public QuantityKind<Length, Length> kind() {
         return KIND;

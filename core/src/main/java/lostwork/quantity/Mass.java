@@ -176,6 +176,56 @@ public final class Mass extends LinearQuantity<Mass> {
         return Money.of(si() * massPrice.si());
     }
 
+    /**
+     * {@return this mass divided by an amount of substance}
+     *
+     * @param amountOfSubstance the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarMass over(AmountOfSubstance amountOfSubstance) {
+        return MolarMass.kilogramsPerMole(si() / amountOfSubstance.si());
+    }
+
+    /**
+     * {@return this mass divided by a density}
+     *
+     * @param density the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Volume over(Density density) {
+        return Volume.cubicMetres(si() / density.si());
+    }
+
+    /**
+     * {@return this mass divided by an emission factor}
+     *
+     * @param emissionFactor the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Energy over(EmissionFactor emissionFactor) {
+        return Energy.joules(si() / emissionFactor.si());
+    }
+
+    /**
+     * {@return this mass divided by an energy}
+     *
+     * @param energy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public EmissionFactor over(Energy energy) {
+        return EmissionFactor.kilogramsPerJoule(si() / energy.si());
+    }
+
+    /**
+     * {@return this mass divided by a mass flow}
+     *
+     * @param massFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(MassFlow massFlow) {
+        return Duration.seconds(si() / massFlow.si());
+    }
+
     @Override
     public QuantityKind<Mass, Mass> kind() {
         return KIND;

@@ -204,6 +204,46 @@ public final class MassFlow extends LinearQuantity<MassFlow> {
         return VolumeFlow.cubicMetresPerSecond(si() / density.si());
     }
 
+    /**
+     * {@return this mass flow divided by an emission factor}
+     *
+     * @param emissionFactor the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Power over(EmissionFactor emissionFactor) {
+        return Power.watts(si() / emissionFactor.si());
+    }
+
+    /**
+     * {@return this mass flow divided by a molar flow}
+     *
+     * @param molarFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarMass over(MolarFlow molarFlow) {
+        return MolarMass.kilogramsPerMole(si() / molarFlow.si());
+    }
+
+    /**
+     * {@return this mass flow divided by a power}
+     *
+     * @param power the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public EmissionFactor over(Power power) {
+        return EmissionFactor.kilogramsPerJoule(si() / power.si());
+    }
+
+    /**
+     * {@return this mass flow divided by a volume flow}
+     *
+     * @param volumeFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Density over(VolumeFlow volumeFlow) {
+        return Density.kilogramsPerCubicMetre(si() / volumeFlow.si());
+    }
+
     @Override
     public QuantityKind<MassFlow, MassFlow> kind() {
         return KIND;

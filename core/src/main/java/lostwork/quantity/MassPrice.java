@@ -86,6 +86,35 @@ public final class MassPrice extends LinearQuantity<MassPrice> {
         return MoneyRate.perSecond(si() * massFlow.si());
     }
 
+    /**
+     * {@return this mass price times an emission factor}
+     *
+     * @param emissionFactor the other factor
+     */
+    public EnergyPrice times(EmissionFactor emissionFactor) {
+        return EnergyPrice.perJoule(si() * emissionFactor.si());
+    }
+
+    /**
+     * {@return this mass price divided by an energy price}
+     *
+     * @param energyPrice the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public SpecificEnergy over(EnergyPrice energyPrice) {
+        return SpecificEnergy.joulesPerKilogram(si() / energyPrice.si());
+    }
+
+    /**
+     * {@return this mass price divided by a specific energy}
+     *
+     * @param specificEnergy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public EnergyPrice over(SpecificEnergy specificEnergy) {
+        return EnergyPrice.perJoule(si() / specificEnergy.si());
+    }
+
     @Override
     public QuantityKind<MassPrice, MassPrice> kind() {
         return KIND;

@@ -111,6 +111,66 @@ public final class MolarEnergy extends LinearQuantity<MolarEnergy> {
         return Energy.joules(si() * amountOfSubstance.si());
     }
 
+    /**
+     * {@return this molar energy divided by a molar entropy: the mean temperature at which heat carries that entropy}
+     *
+     * @param molarEntropy the divisor, not zero
+     * @throws OutOfRangeException if the quotient is no temperature above 0 K, or the divisor is zero
+     */
+    public Temperature over(MolarEntropy molarEntropy) {
+        return Temperature.kelvin(si() / molarEntropy.si());
+    }
+
+    /**
+     * {@return this molar energy divided by a molar heat capacity}
+     *
+     * @param molarHeatCapacity the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public TemperatureSpan over(MolarHeatCapacity molarHeatCapacity) {
+        return TemperatureSpan.kelvins(si() / molarHeatCapacity.si());
+    }
+
+    /**
+     * {@return this molar energy divided by a molar volume}
+     *
+     * @param molarVolume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public PressureDifference over(MolarVolume molarVolume) {
+        return PressureDifference.pascals(si() / molarVolume.si());
+    }
+
+    /**
+     * {@return this molar energy divided by a pressure difference}
+     *
+     * @param pressureDifference the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarVolume over(PressureDifference pressureDifference) {
+        return MolarVolume.cubicMetresPerMole(si() / pressureDifference.si());
+    }
+
+    /**
+     * {@return this molar energy divided by a specific energy}
+     *
+     * @param specificEnergy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarMass over(SpecificEnergy specificEnergy) {
+        return MolarMass.kilogramsPerMole(si() / specificEnergy.si());
+    }
+
+    /**
+     * {@return this molar energy divided by a temperature span}
+     *
+     * @param temperatureSpan the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarHeatCapacity over(TemperatureSpan temperatureSpan) {
+        return MolarHeatCapacity.joulesPerMoleKelvin(si() / temperatureSpan.si());
+    }
+
     @Override
     public QuantityKind<MolarEnergy, MolarEnergy> kind() {
         return KIND;

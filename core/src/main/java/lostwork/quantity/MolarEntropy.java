@@ -112,6 +112,25 @@ public final class MolarEntropy extends LinearQuantity<MolarEntropy> {
         return MolarEnergy.joulesPerMole(si() * temperature.si());
     }
 
+    /**
+     * {@return this molar entropy times an amount of substance}
+     *
+     * @param amountOfSubstance the other factor
+     */
+    public Entropy times(AmountOfSubstance amountOfSubstance) {
+        return Entropy.joulesPerKelvin(si() * amountOfSubstance.si());
+    }
+
+    /**
+     * {@return this molar entropy divided by a specific entropy}
+     *
+     * @param specificEntropy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarMass over(SpecificEntropy specificEntropy) {
+        return MolarMass.kilogramsPerMole(si() / specificEntropy.si());
+    }
+
     @Override
     public QuantityKind<MolarEntropy, MolarEntropy> kind() {
         return KIND;

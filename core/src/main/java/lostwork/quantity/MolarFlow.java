@@ -164,6 +164,15 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
         return si() * condition.molarVolume().si() * 3600;
     }
 
+    /**
+     * {@return this molar flow times a molar heat capacity}
+     *
+     * @param molarHeatCapacity the other factor
+     */
+    public HeatCapacityRate times(MolarHeatCapacity molarHeatCapacity) {
+        return HeatCapacityRate.wattsPerKelvin(si() * molarHeatCapacity.si());
+    }
+
     @Override
     public QuantityKind<MolarFlow, MolarFlow> kind() {
         return KIND;

@@ -88,6 +88,25 @@ public final class MolarHeatCapacity extends LinearQuantity<MolarHeatCapacity> {
         return MolarEnergy.joulesPerMole(si() * temperatureSpan.si());
     }
 
+    /**
+     * {@return this molar heat capacity times a molar flow}
+     *
+     * @param molarFlow the other factor
+     */
+    public HeatCapacityRate times(MolarFlow molarFlow) {
+        return HeatCapacityRate.wattsPerKelvin(si() * molarFlow.si());
+    }
+
+    /**
+     * {@return this molar heat capacity divided by a specific heat capacity}
+     *
+     * @param specificHeatCapacity the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarMass over(SpecificHeatCapacity specificHeatCapacity) {
+        return MolarMass.kilogramsPerMole(si() / specificHeatCapacity.si());
+    }
+
     @Override
     public QuantityKind<MolarHeatCapacity, MolarHeatCapacity> kind() {
         return KIND;

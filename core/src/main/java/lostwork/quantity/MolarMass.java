@@ -98,6 +98,42 @@ public final class MolarMass extends LinearQuantity<MolarMass> {
         return MassFlow.kilogramsPerSecond(si() * molarFlow.si());
     }
 
+    /**
+     * {@return this molar mass times a specific energy}
+     *
+     * @param specificEnergy the other factor
+     */
+    public MolarEnergy times(SpecificEnergy specificEnergy) {
+        return MolarEnergy.joulesPerMole(si() * specificEnergy.si());
+    }
+
+    /**
+     * {@return this molar mass times a specific entropy}
+     *
+     * @param specificEntropy the other factor
+     */
+    public MolarEntropy times(SpecificEntropy specificEntropy) {
+        return MolarEntropy.joulesPerMoleKelvin(si() * specificEntropy.si());
+    }
+
+    /**
+     * {@return this molar mass times a specific heat capacity}
+     *
+     * @param specificHeatCapacity the other factor
+     */
+    public MolarHeatCapacity times(SpecificHeatCapacity specificHeatCapacity) {
+        return MolarHeatCapacity.joulesPerMoleKelvin(si() * specificHeatCapacity.si());
+    }
+
+    /**
+     * {@return this molar mass times a specific volume}
+     *
+     * @param specificVolume the other factor
+     */
+    public MolarVolume times(SpecificVolume specificVolume) {
+        return MolarVolume.cubicMetresPerMole(si() * specificVolume.si());
+    }
+
     @Override
     public QuantityKind<MolarMass, MolarMass> kind() {
         return KIND;

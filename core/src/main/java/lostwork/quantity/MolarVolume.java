@@ -108,6 +108,34 @@ public final class MolarVolume extends LinearQuantity<MolarVolume> {
         return Volume.cubicMetres(si() * amountOfSubstance.si());
     }
 
+    /**
+     * {@return this molar volume times a pressure}
+     *
+     * @param pressure the other factor
+     */
+    public MolarEnergy times(Pressure pressure) {
+        return MolarEnergy.joulesPerMole(si() * pressure.si());
+    }
+
+    /**
+     * {@return this molar volume times a pressure difference}
+     *
+     * @param pressureDifference the other factor
+     */
+    public MolarEnergy times(PressureDifference pressureDifference) {
+        return MolarEnergy.joulesPerMole(si() * pressureDifference.si());
+    }
+
+    /**
+     * {@return this molar volume divided by a specific volume}
+     *
+     * @param specificVolume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarMass over(SpecificVolume specificVolume) {
+        return MolarMass.kilogramsPerMole(si() / specificVolume.si());
+    }
+
     @Override
     public QuantityKind<MolarVolume, MolarVolume> kind() {
         return KIND;

@@ -49,7 +49,7 @@ public final class Money extends LinearQuantity<Money> {
     }
 
     /**
-     * {@return this money divided by a duration}
+     * {@return this amount of money divided by a duration}
      *
      * @param duration the divisor, not zero
      * @throws OutOfRangeException if the divisor is zero
@@ -59,7 +59,7 @@ public final class Money extends LinearQuantity<Money> {
     }
 
     /**
-     * {@return this money divided by an energy}
+     * {@return this amount of money divided by an energy}
      *
      * @param energy the divisor, not zero
      * @throws OutOfRangeException if the divisor is zero
@@ -69,13 +69,43 @@ public final class Money extends LinearQuantity<Money> {
     }
 
     /**
-     * {@return this money divided by a mass}
+     * {@return this amount of money divided by a mass}
      *
      * @param mass the divisor, not zero
      * @throws OutOfRangeException if the divisor is zero
      */
     public MassPrice over(Mass mass) {
         return MassPrice.perKilogram(si() / mass.si());
+    }
+
+    /**
+     * {@return this amount of money divided by an energy price}
+     *
+     * @param energyPrice the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Energy over(EnergyPrice energyPrice) {
+        return Energy.joules(si() / energyPrice.si());
+    }
+
+    /**
+     * {@return this amount of money divided by a mass price}
+     *
+     * @param massPrice the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Mass over(MassPrice massPrice) {
+        return Mass.kilograms(si() / massPrice.si());
+    }
+
+    /**
+     * {@return this amount of money divided by a money rate}
+     *
+     * @param moneyRate the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(MoneyRate moneyRate) {
+        return Duration.seconds(si() / moneyRate.si());
     }
 
     @Override

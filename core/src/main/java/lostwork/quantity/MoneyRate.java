@@ -102,6 +102,36 @@ public final class MoneyRate extends LinearQuantity<MoneyRate> {
         return EnergyPrice.perJoule(si() / power.si());
     }
 
+    /**
+     * {@return this money rate divided by an energy price}
+     *
+     * @param energyPrice the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Power over(EnergyPrice energyPrice) {
+        return Power.watts(si() / energyPrice.si());
+    }
+
+    /**
+     * {@return this money rate divided by a mass flow}
+     *
+     * @param massFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MassPrice over(MassFlow massFlow) {
+        return MassPrice.perKilogram(si() / massFlow.si());
+    }
+
+    /**
+     * {@return this money rate divided by a mass price}
+     *
+     * @param massPrice the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MassFlow over(MassPrice massPrice) {
+        return MassFlow.kilogramsPerSecond(si() / massPrice.si());
+    }
+
     @Override
     public QuantityKind<MoneyRate, MoneyRate> kind() {
         return KIND;

@@ -244,6 +244,56 @@ public final class Power extends LinearQuantity<Power> {
         return MassFlow.kilogramsPerSecond(si() * emissionFactor.si());
     }
 
+    /**
+     * {@return this power divided by an entropy rate: the mean temperature at which heat carries that entropy}
+     *
+     * @param entropyRate the divisor, not zero
+     * @throws OutOfRangeException if the quotient is no temperature above 0 K, or the divisor is zero
+     */
+    public Temperature over(EntropyRate entropyRate) {
+        return Temperature.kelvin(si() / entropyRate.si());
+    }
+
+    /**
+     * {@return this power divided by a heat flux}
+     *
+     * @param heatFlux the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Area over(HeatFlux heatFlux) {
+        return Area.squareMetres(si() / heatFlux.si());
+    }
+
+    /**
+     * {@return this power divided by a molar energy}
+     *
+     * @param molarEnergy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarFlow over(MolarEnergy molarEnergy) {
+        return MolarFlow.molesPerSecond(si() / molarEnergy.si());
+    }
+
+    /**
+     * {@return this power divided by a pressure difference}
+     *
+     * @param pressureDifference the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public VolumeFlow over(PressureDifference pressureDifference) {
+        return VolumeFlow.cubicMetresPerSecond(si() / pressureDifference.si());
+    }
+
+    /**
+     * {@return this power divided by a volume flow}
+     *
+     * @param volumeFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public PressureDifference over(VolumeFlow volumeFlow) {
+        return PressureDifference.pascals(si() / volumeFlow.si());
+    }
+
     @Override
     public QuantityKind<Power, Power> kind() {
         return KIND;

@@ -364,6 +364,24 @@ public final class Pressure extends ScalarQuantity<Pressure, PressureDifference>
         return new Pressure(si() * factor.si());
     }
 
+    /**
+     * {@return this pressure times a molar volume}
+     *
+     * @param molarVolume the other factor
+     */
+    public MolarEnergy times(MolarVolume molarVolume) {
+        return MolarEnergy.joulesPerMole(si() * molarVolume.si());
+    }
+
+    /**
+     * {@return this pressure times a volume flow}
+     *
+     * @param volumeFlow the other factor
+     */
+    public Power times(VolumeFlow volumeFlow) {
+        return Power.watts(si() * volumeFlow.si());
+    }
+
     @Override
     public QuantityKind<Pressure, PressureDifference> kind() {
         return KIND;

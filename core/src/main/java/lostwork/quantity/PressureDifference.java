@@ -160,6 +160,35 @@ public final class PressureDifference extends LinearQuantity<PressureDifference>
         return Power.watts(si() * volumeFlow.si());
     }
 
+    /**
+     * {@return this pressure difference times a molar volume}
+     *
+     * @param molarVolume the other factor
+     */
+    public MolarEnergy times(MolarVolume molarVolume) {
+        return MolarEnergy.joulesPerMole(si() * molarVolume.si());
+    }
+
+    /**
+     * {@return this pressure difference divided by a density}
+     *
+     * @param density the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public SpecificEnergy over(Density density) {
+        return SpecificEnergy.joulesPerKilogram(si() / density.si());
+    }
+
+    /**
+     * {@return this pressure difference divided by a specific energy}
+     *
+     * @param specificEnergy the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Density over(SpecificEnergy specificEnergy) {
+        return Density.kilogramsPerCubicMetre(si() / specificEnergy.si());
+    }
+
     @Override
     public QuantityKind<PressureDifference, PressureDifference> kind() {
         return KIND;

@@ -80,6 +80,15 @@ public final class RotationalFrequency extends LinearQuantity<RotationalFrequenc
         return si();
     }
 
+    /**
+     * {@return this rotational frequency times a volume}
+     *
+     * @param volume the other factor
+     */
+    public VolumeFlow times(Volume volume) {
+        return VolumeFlow.cubicMetresPerSecond(si() * volume.si());
+    }
+
     @Override
     public QuantityKind<RotationalFrequency, RotationalFrequency> kind() {
         return KIND;

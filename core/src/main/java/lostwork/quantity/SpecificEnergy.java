@@ -177,6 +177,54 @@ public final class SpecificEnergy extends LinearQuantity<SpecificEnergy> {
         return TemperatureSpan.kelvins(si() / specificHeatCapacity.si());
     }
 
+    /**
+     * {@return this specific energy times a density}
+     *
+     * @param density the other factor
+     */
+    public PressureDifference times(Density density) {
+        return PressureDifference.pascals(si() * density.si());
+    }
+
+    /**
+     * {@return this specific energy times an energy price}
+     *
+     * @param energyPrice the other factor
+     */
+    public MassPrice times(EnergyPrice energyPrice) {
+        return MassPrice.perKilogram(si() * energyPrice.si());
+    }
+
+    /**
+     * {@return this specific energy divided by a pressure difference}
+     *
+     * @param pressureDifference the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public SpecificVolume over(PressureDifference pressureDifference) {
+        return SpecificVolume.cubicMetresPerKilogram(si() / pressureDifference.si());
+    }
+
+    /**
+     * {@return this specific energy divided by a specific entropy: the mean temperature at which heat carries that entropy}
+     *
+     * @param specificEntropy the divisor, not zero
+     * @throws OutOfRangeException if the quotient is no temperature above 0 K, or the divisor is zero
+     */
+    public Temperature over(SpecificEntropy specificEntropy) {
+        return Temperature.kelvin(si() / specificEntropy.si());
+    }
+
+    /**
+     * {@return this specific energy divided by a specific volume}
+     *
+     * @param specificVolume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public PressureDifference over(SpecificVolume specificVolume) {
+        return PressureDifference.pascals(si() / specificVolume.si());
+    }
+
     @Override
     public QuantityKind<SpecificEnergy, SpecificEnergy> kind() {
         return KIND;

@@ -131,6 +131,24 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
         return Density.kilogramsPerCubicMetre(1 / si());
     }
 
+    /**
+     * {@return this specific volume times a pressure}
+     *
+     * @param pressure the other factor
+     */
+    public SpecificEnergy times(Pressure pressure) {
+        return SpecificEnergy.joulesPerKilogram(si() * pressure.si());
+    }
+
+    /**
+     * {@return this specific volume times a pressure difference}
+     *
+     * @param pressureDifference the other factor
+     */
+    public SpecificEnergy times(PressureDifference pressureDifference) {
+        return SpecificEnergy.joulesPerKilogram(si() * pressureDifference.si());
+    }
+
     @Override
     public QuantityKind<SpecificVolume, SpecificVolume> kind() {
         return KIND;

@@ -109,6 +109,15 @@ public final class Speed extends LinearQuantity<Speed> {
         return SpecificEnergy.joulesPerKilogram(si() * si() / 2);
     }
 
+    /**
+     * {@return this speed times a duration}
+     *
+     * @param duration the other factor
+     */
+    public Length times(Duration duration) {
+        return Length.metres(si() * duration.si());
+    }
+
     @Override
     public QuantityKind<Speed, Speed> kind() {
         return KIND;

@@ -159,6 +159,42 @@ public final class Temperature extends ScalarQuantity<Temperature, TemperatureSp
         return Ratio.fraction(si() / other.si());
     }
 
+    /**
+     * {@return this temperature times an entropy}
+     *
+     * @param entropy the other factor
+     */
+    public Energy times(Entropy entropy) {
+        return Energy.joules(si() * entropy.si());
+    }
+
+    /**
+     * {@return this temperature times an entropy rate}
+     *
+     * @param entropyRate the other factor
+     */
+    public Power times(EntropyRate entropyRate) {
+        return Power.watts(si() * entropyRate.si());
+    }
+
+    /**
+     * {@return this temperature times a molar entropy}
+     *
+     * @param molarEntropy the other factor
+     */
+    public MolarEnergy times(MolarEntropy molarEntropy) {
+        return MolarEnergy.joulesPerMole(si() * molarEntropy.si());
+    }
+
+    /**
+     * {@return this temperature times a specific entropy}
+     *
+     * @param specificEntropy the other factor
+     */
+    public SpecificEnergy times(SpecificEntropy specificEntropy) {
+        return SpecificEnergy.joulesPerKilogram(si() * specificEntropy.si());
+    }
+
     @Override
     public QuantityKind<Temperature, TemperatureSpan> kind() {
         return KIND;

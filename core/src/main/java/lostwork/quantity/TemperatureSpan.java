@@ -86,6 +86,51 @@ public final class TemperatureSpan extends LinearQuantity<TemperatureSpan> {
         return Units.RANKINE_SPAN.fromSi(si());
     }
 
+    /**
+     * {@return this temperature span times a thermal conductance}
+     *
+     * @param conductance the other factor
+     */
+    public Power times(Conductance conductance) {
+        return Power.watts(si() * conductance.si());
+    }
+
+    /**
+     * {@return this temperature span times a heat capacity rate}
+     *
+     * @param heatCapacityRate the other factor
+     */
+    public Power times(HeatCapacityRate heatCapacityRate) {
+        return Power.watts(si() * heatCapacityRate.si());
+    }
+
+    /**
+     * {@return this temperature span times a heat transfer coefficient}
+     *
+     * @param heatTransferCoefficient the other factor
+     */
+    public HeatFlux times(HeatTransferCoefficient heatTransferCoefficient) {
+        return HeatFlux.wattsPerSquareMetre(si() * heatTransferCoefficient.si());
+    }
+
+    /**
+     * {@return this temperature span times a molar heat capacity}
+     *
+     * @param molarHeatCapacity the other factor
+     */
+    public MolarEnergy times(MolarHeatCapacity molarHeatCapacity) {
+        return MolarEnergy.joulesPerMole(si() * molarHeatCapacity.si());
+    }
+
+    /**
+     * {@return this temperature span times a specific heat capacity}
+     *
+     * @param specificHeatCapacity the other factor
+     */
+    public SpecificEnergy times(SpecificHeatCapacity specificHeatCapacity) {
+        return SpecificEnergy.joulesPerKilogram(si() * specificHeatCapacity.si());
+    }
+
     @Override
     public QuantityKind<TemperatureSpan, TemperatureSpan> kind() {
         return KIND;

@@ -83,6 +83,26 @@ public final class ThermalConductivity extends LinearQuantity<ThermalConductivit
         return Units.MILLIWATT_PER_METRE_KELVIN.fromSi(si());
     }
 
+    /**
+     * {@return this thermal conductivity divided by a heat transfer coefficient}
+     *
+     * @param heatTransferCoefficient the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Length over(HeatTransferCoefficient heatTransferCoefficient) {
+        return Length.metres(si() / heatTransferCoefficient.si());
+    }
+
+    /**
+     * {@return this thermal conductivity divided by a length}
+     *
+     * @param length the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public HeatTransferCoefficient over(Length length) {
+        return HeatTransferCoefficient.wattsPerSquareMetreKelvin(si() / length.si());
+    }
+
     @Override
     public QuantityKind<ThermalConductivity, ThermalConductivity> kind() {
         return KIND;

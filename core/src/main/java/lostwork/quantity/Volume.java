@@ -104,6 +104,93 @@ public final class Volume extends LinearQuantity<Volume> {
         return Mass.kilograms(si() * density.si());
     }
 
+    /**
+     * {@return this volume times a pressure}
+     *
+     * @param pressure the other factor
+     */
+    public Energy times(Pressure pressure) {
+        return Energy.joules(si() * pressure.si());
+    }
+
+    /**
+     * {@return this volume times a pressure difference}
+     *
+     * @param pressureDifference the other factor
+     */
+    public Energy times(PressureDifference pressureDifference) {
+        return Energy.joules(si() * pressureDifference.si());
+    }
+
+    /**
+     * {@return this volume times a rotational frequency}
+     *
+     * @param rotationalFrequency the other factor
+     */
+    public VolumeFlow times(RotationalFrequency rotationalFrequency) {
+        return VolumeFlow.cubicMetresPerSecond(si() * rotationalFrequency.si());
+    }
+
+    /**
+     * {@return this volume divided by an amount of substance}
+     *
+     * @param amountOfSubstance the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarVolume over(AmountOfSubstance amountOfSubstance) {
+        return MolarVolume.cubicMetresPerMole(si() / amountOfSubstance.si());
+    }
+
+    /**
+     * {@return this volume divided by an area}
+     *
+     * @param area the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Length over(Area area) {
+        return Length.metres(si() / area.si());
+    }
+
+    /**
+     * {@return this volume divided by a length}
+     *
+     * @param length the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Area over(Length length) {
+        return Area.squareMetres(si() / length.si());
+    }
+
+    /**
+     * {@return this volume divided by a molar volume}
+     *
+     * @param molarVolume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public AmountOfSubstance over(MolarVolume molarVolume) {
+        return AmountOfSubstance.moles(si() / molarVolume.si());
+    }
+
+    /**
+     * {@return this volume divided by a specific volume}
+     *
+     * @param specificVolume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Mass over(SpecificVolume specificVolume) {
+        return Mass.kilograms(si() / specificVolume.si());
+    }
+
+    /**
+     * {@return this volume divided by a volume flow}
+     *
+     * @param volumeFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Duration over(VolumeFlow volumeFlow) {
+        return Duration.seconds(si() / volumeFlow.si());
+    }
+
     @Override
     public QuantityKind<Volume, Volume> kind() {
         return KIND;

@@ -179,6 +179,75 @@ public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
         return Volume.cubicMetres(si() * duration.si());
     }
 
+    /**
+     * {@return this volume flow times a pressure}
+     *
+     * @param pressure the other factor
+     */
+    public Power times(Pressure pressure) {
+        return Power.watts(si() * pressure.si());
+    }
+
+    /**
+     * {@return this volume flow divided by an area}
+     *
+     * @param area the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Speed over(Area area) {
+        return Speed.metresPerSecond(si() / area.si());
+    }
+
+    /**
+     * {@return this volume flow divided by a mass flow}
+     *
+     * @param massFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public SpecificVolume over(MassFlow massFlow) {
+        return SpecificVolume.cubicMetresPerKilogram(si() / massFlow.si());
+    }
+
+    /**
+     * {@return this volume flow divided by a molar flow}
+     *
+     * @param molarFlow the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public MolarVolume over(MolarFlow molarFlow) {
+        return MolarVolume.cubicMetresPerMole(si() / molarFlow.si());
+    }
+
+    /**
+     * {@return this volume flow divided by a rotational frequency}
+     *
+     * @param rotationalFrequency the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Volume over(RotationalFrequency rotationalFrequency) {
+        return Volume.cubicMetres(si() / rotationalFrequency.si());
+    }
+
+    /**
+     * {@return this volume flow divided by a speed}
+     *
+     * @param speed the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public Area over(Speed speed) {
+        return Area.squareMetres(si() / speed.si());
+    }
+
+    /**
+     * {@return this volume flow divided by a volume}
+     *
+     * @param volume the divisor, not zero
+     * @throws OutOfRangeException if the divisor is zero
+     */
+    public RotationalFrequency over(Volume volume) {
+        return RotationalFrequency.revolutionsPerSecond(si() / volume.si());
+    }
+
     @Override
     public QuantityKind<VolumeFlow, VolumeFlow> kind() {
         return KIND;
