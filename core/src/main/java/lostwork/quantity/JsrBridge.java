@@ -31,7 +31,7 @@ final class JsrBridge {
             throw new IllegalArgumentException(quantity + " is a difference (its scale is relative) and no "
                     + kind.name() + ": read it as the kind " + kind.difference().name() + " instead");
         }
-        if (!relative && kind.isLinear() && converter.convert(0.0) != 0) {
+        if (!relative && kind.isLinear() && !converter.isLinear()) {
             throw new IllegalArgumentException(quantity + " is a point on a scale with a zero of its own and no "
                     + kind.name() + ": give it a relative scale or a unit such as "
                     + kind.coherentUnit().symbol());
@@ -39,9 +39,16 @@ final class JsrBridge {
         return convert(converter, quantity.getValue().doubleValue(), kind.isLinear());
     }
 
-    /** Converts a point, or a difference, for which the zero of the scale plays no part. */
+    /** Converts a point, or a difference, for which only the linear steps count: the zero of the scale plays no part. */
     private static double convert(UnitConverter converter, double value, boolean difference) {
-        return difference ? converter.convert(value) - converter.convert(0.0) : converter.convert(value);
+        if (!difference) {
+            return converter.convert(value);
+        }
+        double converted = value;
+        for (UnitConverter step : converter.getConversionSteps()) {
+            converted = step.isLinear() ? step.convert(converted) : converted;
+        }
+        return converted;
     }
 
     /** A span of temperatures leaves with the scale that says so, or a conversion to °C would shift it. */

@@ -190,9 +190,9 @@ final class QuantityText {
         return digits.substring(0, end) + (mark < 0 ? "" : text.substring(mark));
     }
 
-    /** {@return the number with the fewest significant digits, at least 7, that reads back as the same double} */
+    /** {@return the number with the fewest digits of 15, 16 and 17 that read back as the same double, less final zeros} */
     static String shortest(double value) {
-        for (int digits = 7; digits < EXACT_DIGITS; digits++) {
+        for (int digits = 15; digits < EXACT_DIGITS; digits++) {
             final String text = printShort(value, digits);
             if (Double.parseDouble(text) == value) {
                 return text;

@@ -95,6 +95,11 @@ public final class Ratio extends LinearQuantity<Ratio> {
         return Units.PER_MILLION.fromSi(si());
     }
 
+    /** {@return the rest to one: 1 less this ratio, such as the lost share of an efficiency} */
+    public Ratio complement() {
+        return new Ratio(1 - si());
+    }
+
     @Override
     public QuantityKind<Ratio, Ratio> kind() {
         return KIND;

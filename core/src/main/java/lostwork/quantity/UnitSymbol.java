@@ -12,6 +12,9 @@ import java.util.TreeMap;
  * grammar, such as {@code bar(a)}, is its own key.
  */
 final class UnitSymbol {
+    /** Longer texts are no symbols of units; the limit also bounds how deep parentheses nest. */
+    private static final int LONGEST = 64;
+
     private static final String SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
     private final String text;
@@ -28,6 +31,9 @@ final class UnitSymbol {
      * @param symbol the symbol as written
      */
     static String key(String symbol) {
+        if (symbol.length() > LONGEST) {
+            return symbol;
+        }
         final String plain = plain(symbol);
         final UnitSymbol reader = new UnitSymbol(plain);
         if (!reader.product(1, false)) {
