@@ -18,19 +18,39 @@ import lostwork.solve.ConvergenceException;
  * and rise strictly, and T(h) and T(s) exist for every value between the ends.
  */
 final class CaloricCurve {
-    /** Steps of a safeguarded Newton search; about six are used, bisection alone would need sixty. */
+    /** Steps of a safeguarded Newton search; about three are used, bisection alone would need sixty. */
     private static final int STEP_LIMIT = 200;
-    /** A Newton step this small, relative to the temperature, leaves an error of its square: none in a double. */
-    private static final double LAST_STEP = 1e-9;
+    /** After a Newton step this small, relative to the temperature, the error is its square: below a double's digits. */
+    private static final double LAST_STEP = 1e-7;
+    /** A value this far beyond an end of the range, relative to its terms, is taken as rounded from that end. */
+    private static final double ROUNDING = 1e-14;
 
     /** Limits of the segments in K, ascending; one more than there are segments. */
     private final double[] limits;
 
     private final Segment[] segments;
 
+    // Values at the limits, from the segment below except at the first.
+    private final double[] logLimits;
+    private final double[] enthalpies;
+    private final double[] entropies;
+    private final double[] heatCapacities;
+
     private CaloricCurve(double[] limits, Segment[] segments) {
         this.limits = limits;
         this.segments = segments;
+        final int n = limits.length;
+        logLimits = new double[n];
+        enthalpies = new double[n];
+        entropies = new double[n];
+        heatCapacities = new double[n];
+        for (int i = 0; i < n; i++) {
+            final Segment below = segments[Math.max(i - 1, 0)];
+            logLimits[i] = Math.log(limits[i]);
+            enthalpies[i] = below.enthalpy(limits[i], logLimits[i]);
+            entropies[i] = below.entropy(limits[i], logLimits[i]);
+            heatCapacities[i] = below.heatCapacity(limits[i]);
+        }
     }
 
     /**
@@ -140,54 +160,50 @@ final class CaloricCurve {
      * @param limitedBy whose range it is, for the message
      */
     double temperatureAtEnthalpy(double wanted, double slope, String name, String unit, String limitedBy) {
-        final double least = enthalpy(limits[0]) - slope * limits[0];
-        final double most = enthalpy(highest()) - slope * highest();
-        if (!(wanted >= least && wanted <= most)) {
-            throw outside(name, wanted, least, most, unit, limitedBy);
+        final int last = segments.length;
+        final double least = enthalpies[0] - slope * limits[0];
+        final double most = enthalpies[last] - slope * limits[last];
+        if (!(wanted > least && wanted < most)) {
+            return end(wanted, least, most, heatCapacities[last] * limits[last], name, unit, limitedBy);
         }
         int i = 0;
-        double below = least;
-        double above = most;
-        while (i < segments.length - 1) {
-            final double joint = limits[i + 1];
-            above = segments[i].enthalpy(joint, Math.log(joint)) - slope * joint;
-            if (wanted <= above) {
-                break;
-            }
-            below = above;
-            above = most;
+        while (i < last - 1 && wanted > enthalpies[i + 1] - slope * limits[i + 1]) {
             i++;
         }
         final Segment segment = segments[i];
         double low = limits[i];
         double high = limits[i + 1];
-        double t = low + (high - low) * (wanted - below) / (above - below);
+        double t = clipped(
+                cubic(
+                        wanted,
+                        enthalpies[i] - slope * low,
+                        enthalpies[i + 1] - slope * high,
+                        low,
+                        high,
+                        1 / (heatCapacities[i] - slope),
+                        1 / (heatCapacities[i + 1] - slope)),
+                low,
+                high);
+        double excess = Double.NaN;
         for (int step = 0; step < STEP_LIMIT; step++) {
-            final double excess = segment.enthalpy(t, Math.log(t)) - slope * t - wanted;
-            if (excess == 0) {
-                return t;
-            }
-            if (excess < 0) {
+            excess = segment.enthalpy(t, Math.log(t)) - slope * t - wanted;
+            if (excess <= 0) {
                 low = t;
-            } else {
+            }
+            if (excess >= 0) {
                 high = t;
             }
             final double newton = t - excess / (segment.heatCapacity(t) - slope);
-            if (newton >= low && newton <= high) {
-                if (Math.abs(newton - t) <= LAST_STEP * t) {
-                    return newton;
-                }
-                t = newton;
-            } else {
-                final double middle = 0.5 * (low + high);
-                if (middle <= low || middle >= high) {
-                    return middle;
-                }
-                t = middle;
+            if (newton >= low && newton <= high && Math.abs(newton - t) <= LAST_STEP * t) {
+                return newton;
             }
+            final double next = newton >= low && newton <= high ? newton : 0.5 * (low + high);
+            if (next == t) {
+                return t;
+            }
+            t = next;
         }
-        final double left = segment.enthalpy(t, Math.log(t)) - slope * t - wanted;
-        throw notFound(name, wanted, unit, limitedBy, t, left);
+        throw notFound(name, wanted, unit, limitedBy, t, excess);
     }
 
     /**
@@ -200,58 +216,77 @@ final class CaloricCurve {
      * @param limitedBy whose range it is, for the message
      */
     double temperatureAtEntropy(double wanted, double slope, String name, String unit, String limitedBy) {
-        final double least = entropy(limits[0]) - slope * Math.log(limits[0]);
-        final double most = entropy(highest()) - slope * Math.log(highest());
-        if (!(wanted >= least && wanted <= most)) {
-            throw outside(name, wanted, least, most, unit, limitedBy);
+        final int last = segments.length;
+        final double least = entropies[0] - slope * logLimits[0];
+        final double most = entropies[last] - slope * logLimits[last];
+        if (!(wanted > least && wanted < most)) {
+            return end(wanted, least, most, 10 * heatCapacities[last], name, unit, limitedBy);
         }
         int i = 0;
-        double below = least;
-        double above = most;
-        while (i < segments.length - 1) {
-            final double ln = Math.log(limits[i + 1]);
-            above = segments[i].entropy(limits[i + 1], ln) - slope * ln;
-            if (wanted <= above) {
-                break;
-            }
-            below = above;
-            above = most;
+        while (i < last - 1 && wanted > entropies[i + 1] - slope * logLimits[i + 1]) {
             i++;
         }
         final Segment segment = segments[i];
         double low = limits[i];
         double high = limits[i + 1];
         // The entropy is nearly linear in ln T.
-        double t = low * Math.exp(Math.log(high / low) * (wanted - below) / (above - below));
-        t = Math.min(Math.max(t, low), high);
+        double t = clipped(
+                Math.exp(cubic(
+                        wanted,
+                        entropies[i] - slope * logLimits[i],
+                        entropies[i + 1] - slope * logLimits[i + 1],
+                        logLimits[i],
+                        logLimits[i + 1],
+                        1 / (heatCapacities[i] - slope),
+                        1 / (heatCapacities[i + 1] - slope))),
+                low,
+                high);
+        double excess = Double.NaN;
         for (int step = 0; step < STEP_LIMIT; step++) {
             final double ln = Math.log(t);
-            final double excess = segment.entropy(t, ln) - slope * ln - wanted;
-            if (excess == 0) {
-                return t;
-            }
-            if (excess < 0) {
+            excess = segment.entropy(t, ln) - slope * ln - wanted;
+            if (excess <= 0) {
                 low = t;
-            } else {
+            }
+            if (excess >= 0) {
                 high = t;
             }
-            final double logStep = -excess / (segment.heatCapacity(t) - slope);
-            final double newton = t * Math.exp(logStep);
-            if (newton >= low && newton <= high) {
-                if (Math.abs(logStep) <= LAST_STEP) {
-                    return newton;
-                }
-                t = newton;
-            } else {
-                final double middle = 0.5 * (low + high);
-                if (middle <= low || middle >= high) {
-                    return middle;
-                }
-                t = middle;
+            final double newton = t - t * excess / (segment.heatCapacity(t) - slope);
+            if (newton >= low && newton <= high && Math.abs(newton - t) <= LAST_STEP * t) {
+                return newton;
             }
+            final double next = newton >= low && newton <= high ? newton : 0.5 * (low + high);
+            if (next == t) {
+                return t;
+            }
+            t = next;
         }
-        final double ln = Math.log(t);
-        throw notFound(name, wanted, unit, limitedBy, t, segment.entropy(t, ln) - slope * ln - wanted);
+        throw notFound(name, wanted, unit, limitedBy, t, excess);
+    }
+
+    /** {@return the cubic through two points with their slopes (Hermite), at x: a start within a few kelvins} */
+    private static double cubic(double x, double x0, double x1, double y0, double y1, double slope0, double slope1) {
+        final double width = x1 - x0;
+        final double u = (x - x0) / width;
+        final double v = 1 - u;
+        return v * v * (1 + 2 * u) * y0 + u * u * (3 - 2 * u) * y1 + u * v * width * (v * slope0 - u * slope1);
+    }
+
+    private static double clipped(double t, double low, double high) {
+        return Math.min(Math.max(t, low), high);
+    }
+
+    /** {@return the end of the range that a value not inside it stands for; refuses one that stands for none} */
+    private double end(
+            double wanted, double least, double most, double scale, String name, String unit, String limitedBy) {
+        final double rounding = ROUNDING * (Math.abs(wanted) + scale);
+        if (Math.abs(wanted - least) <= rounding) {
+            return lowest();
+        }
+        if (Math.abs(wanted - most) <= rounding) {
+            return highest();
+        }
+        throw outside(name, wanted, least, most, unit, limitedBy);
     }
 
     private OutOfRangeException outside(

@@ -18,6 +18,9 @@ final class IdealGasModel implements FluidModel {
     /** Standard pressure of the data, 1 bar. */
     static final double STANDARD_PRESSURE_PA = 1e5;
 
+    /** A computed value this far outside the range, relative, is rounded from its limit; pressures from an exponential. */
+    private static final double ROUNDING = 1e-12;
+
     private static final double LOWEST_PRESSURE_PA = 1e-3;
     private static final double HIGHEST_PRESSURE_PA = 1e8;
     private static final String ENERGY_UNIT = "J/kg";
@@ -147,24 +150,24 @@ final class IdealGasModel implements FluidModel {
 
     @Override
     public void atPressureVolume(double pressure, double volume, StatePoint out) {
-        atTemperaturePressure(pressure * volume / gasConstant, pressure, out);
+        atRounded(pressure * volume / gasConstant, pressure, out);
     }
 
     @Override
     public void atTemperatureVolume(double temperature, double volume, StatePoint out) {
-        atTemperaturePressure(temperature, gasConstant * temperature / volume, out);
+        atRounded(temperature, gasConstant * temperature / volume, out);
     }
 
     @Override
     public void atTemperatureEntropy(double temperature, double entropy, StatePoint out) {
         range.requireTemperature(temperature);
-        atTemperaturePressure(temperature, pressureAt(temperature, entropy), out);
+        atRounded(temperature, pressureAt(temperature, entropy), out);
     }
 
     @Override
     public void atEnthalpyEntropy(double enthalpy, double entropy, StatePoint out) {
         final double temperature = temperatureAtEnthalpy(enthalpy);
-        atTemperaturePressure(temperature, pressureAt(temperature, entropy), out);
+        atRounded(temperature, pressureAt(temperature, entropy), out);
     }
 
     @Override
@@ -180,6 +183,21 @@ final class IdealGasModel implements FluidModel {
                 curve.temperatureAtEntropy(wanted, gasConstant, "entropy less R ln T", ENTROPY_UNIT, name),
                 volume,
                 out);
+    }
+
+    /** Takes a computed temperature or pressure that rounding has carried over a limit as that limit. */
+    private void atRounded(double temperature, double pressure, StatePoint out) {
+        atTemperaturePressure(
+                rounded(temperature, range.lowestTemperature(), range.highestTemperature()),
+                rounded(pressure, range.lowestPressure(), range.highestPressure()),
+                out);
+    }
+
+    private static double rounded(double value, double low, double high) {
+        if (value < low && value >= low * (1 - ROUNDING)) {
+            return low;
+        }
+        return value > high && value <= high * (1 + ROUNDING) ? high : value;
     }
 
     private double pressureAt(double temperature, double entropy) {

@@ -171,6 +171,38 @@ class IdealMixtureLawTest {
         }
     }
 
+    /** A state on a corner of the range is found again from each pair, in spite of rounding. */
+    @Test
+    void cornersOfTheRangeReturn() {
+        final FluidModel model = DryAir.standard().model();
+        final StatePoint corner = new StatePoint();
+        final StatePoint found = new StatePoint();
+        final SplittableRandom random = new SplittableRandom(SEED);
+        for (int i = 0; i < CASES; i++) {
+            final double t = i % 2 == 0
+                    ? model.range().lowestTemperature()
+                    : model.range().highestTemperature();
+            final double p = i % 8 == 0 ? 1e-3 : i % 8 == 1 ? 1e8 : Math.exp(random.nextDouble(-6, 18));
+            model.atTemperaturePressure(t, p, corner);
+            model.atPressureEnthalpy(p, corner.enthalpy, found);
+            assertEquals(t, found.temperature, 1e-12 * t);
+            model.atPressureEntropy(p, corner.entropy, found);
+            assertEquals(t, found.temperature, 1e-12 * t);
+            model.atPressureVolume(p, corner.volume, found);
+            assertEquals(t, found.temperature, 1e-12 * t);
+            model.atTemperatureVolume(t, corner.volume, found);
+            assertEquals(p, found.pressure, 1e-12 * p);
+            model.atTemperatureEntropy(t, corner.entropy, found);
+            assertEquals(p, found.pressure, 1e-11 * p);
+            model.atEnthalpyEntropy(corner.enthalpy, corner.entropy, found);
+            assertEquals(p, found.pressure, 1e-11 * p);
+            model.atInternalEnergyVolume(corner.internalEnergy(), corner.volume, found);
+            assertEquals(t, found.temperature, 1e-12 * t);
+            model.atEntropyVolume(corner.entropy, corner.volume, found);
+            assertEquals(t, found.temperature, 1e-12 * t);
+        }
+    }
+
     /** (∂s/∂p) at constant T is -(∂v/∂T) at constant p, to rounding: one gas constant stands in both. */
     @Test
     void entropyFallsWithPressureAsTheVolumeSays() {
