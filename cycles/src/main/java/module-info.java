@@ -2,7 +2,7 @@
 module lostwork.cycles {
     requires transitive lostwork.fluids;
     requires static transitive org.jspecify;
-    requires commons.math3;
 
+    exports lostwork.component;
     exports lostwork.plant;
 }

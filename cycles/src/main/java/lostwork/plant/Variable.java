@@ -1,5 +1,7 @@
 package lostwork.plant;
 
+import java.util.function.Consumer;
+import lostwork.plant.kernel.Tape;
 import lostwork.quantity.QuantityKind;
 import lostwork.quantity.ScalarQuantity;
 
@@ -7,11 +9,12 @@ import lostwork.quantity.ScalarQuantity;
  * A named physical value of a plant: the temperature at a port, the efficiency of a turbine, the power of a shaft.
  *
  * <p>A variable is an identity, the name of its component and a name of its own; its values live in specifications and
- * solutions. Immutable and thread-safe.
+ * solutions. So a specification survives a copy of its plant. A variable is also a term of equations. Immutable and
+ * thread-safe.
  *
  * @param <Q> the quantity of its values
  */
-public final class Variable<Q extends ScalarQuantity<Q, ?>> {
+public final class Variable<Q extends ScalarQuantity<Q, ?>> extends Expression {
     private final String component;
     private final String name;
     private final QuantityKind<Q, ?> kind;
@@ -23,7 +26,8 @@ public final class Variable<Q extends ScalarQuantity<Q, ?>> {
      * @param name its own name within the component
      * @param kind the kind of its values
      */
-    public Variable(String component, String name, QuantityKind<Q, ?> kind) {
+    Variable(String component, String name, QuantityKind<Q, ?> kind) {
+        super(kind.dimension());
         this.component = component;
         this.name = name;
         this.kind = kind;
@@ -42,6 +46,16 @@ public final class Variable<Q extends ScalarQuantity<Q, ?>> {
     /** {@return the kind of its values} */
     public QuantityKind<Q, ?> kind() {
         return kind;
+    }
+
+    @Override
+    void forEachVariable(Consumer<Variable<?>> consumer) {
+        consumer.accept(this);
+    }
+
+    @Override
+    int emit(Tape.Builder tape, Resolution resolution) {
+        return resolution.emit(this, tape);
     }
 
     @Override

@@ -1,0 +1,64 @@
+package lostwork.component;
+
+import lostwork.plant.Component;
+import lostwork.plant.Equations;
+import lostwork.plant.FlowPath;
+import lostwork.plant.HeatInlet;
+import lostwork.plant.Inlet;
+import lostwork.plant.Outlet;
+import lostwork.plant.Variable;
+import lostwork.quantity.Power;
+import lostwork.quantity.PressureDifference;
+
+/** A stream that takes up heat from a port. */
+public final class Heater extends Component implements FlowPath {
+    private final Inlet inlet = inlet("inlet");
+    private final Outlet outlet = outlet("outlet");
+    private final HeatInlet heat = heatInlet("heat");
+    private final Variable<PressureDifference> pressureLoss = variable("pressure loss", PressureDifference.KIND);
+
+    /**
+     * Creates a heater.
+     *
+     * @param name its name
+     */
+    public Heater(String name) {
+        super(name);
+    }
+
+    @Override
+    public Inlet inlet() {
+        return inlet;
+    }
+
+    @Override
+    public Outlet outlet() {
+        return outlet;
+    }
+
+    /** {@return where the heat enters; its temperature is that of the source} */
+    public HeatInlet heat() {
+        return heat;
+    }
+
+    /** {@return the heat rate} */
+    public Variable<Power> duty() {
+        return heat.rate();
+    }
+
+    /** {@return the pressure at the inlet less that at the outlet; none is assumed unless something else is given} */
+    public Variable<PressureDifference> pressureLoss() {
+        return pressureLoss;
+    }
+
+    @Override
+    protected void describe(Equations e) {
+        e.sameFlow(inlet, outlet);
+        e.law(
+                "energy balance",
+                heat.rate(),
+                inlet.flow().times(outlet.enthalpy().minus(inlet.enthalpy())));
+        e.law("pressure loss", pressureLoss, inlet.pressure().minus(outlet.pressure()));
+        e.assume("no pressure loss", pressureLoss, PressureDifference.pascals(0));
+    }
+}

@@ -1,0 +1,8 @@
+package lostwork.plant;
+
+/** A port where heat enters a component. */
+public final class HeatInlet extends HeatPort {
+    HeatInlet(String component, String name) {
+        super(component, name);
+    }
+}

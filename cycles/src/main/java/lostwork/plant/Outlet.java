@@ -1,0 +1,8 @@
+package lostwork.plant;
+
+/** A port where a stream leaves a component. */
+public final class Outlet extends MaterialPort {
+    Outlet(String component, String name) {
+        super(component, name);
+    }
+}

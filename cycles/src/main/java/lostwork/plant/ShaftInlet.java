@@ -1,0 +1,8 @@
+package lostwork.plant;
+
+/** A port where mechanical power enters a component. */
+public final class ShaftInlet extends ShaftPort {
+    ShaftInlet(String component, String name) {
+        super(component, name);
+    }
+}

@@ -1,0 +1,304 @@
+package lostwork.plant;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.IntStream;
+import lostwork.fluid.SaturationModel;
+import lostwork.plant.kernel.BlockFailure;
+import lostwork.plant.kernel.BlockSolver;
+import lostwork.plant.kernel.EquationSystem;
+import lostwork.plant.kernel.Limits;
+import lostwork.plant.kernel.Workspace;
+
+/**
+ * The diagnosed, ordered and compiled form of a plant and of the list of what is given: which equations are solved in
+ * which order for which unknowns. It does not depend on the given values and serves any number of solves, also at the
+ * same time. Immutable and thread-safe.
+ */
+public final class SolvePlan {
+    private final Plant plant;
+    private final List<Variable<?>> givenVariables;
+    private final boolean[] given;
+    private final boolean[] active;
+    private final List<Planner.Entry> entries;
+    private final EquationSystem system;
+    private final List<Equation> assumptions;
+    private final List<Equation> gaveWay;
+    private final List<Equation> redundant;
+    private final NeighbourStarts starts;
+
+    SolvePlan(
+            Plant plant,
+            List<Variable<?>> givenVariables,
+            boolean[] given,
+            boolean[] active,
+            List<Planner.Entry> entries,
+            EquationSystem system,
+            List<Equation> assumptions,
+            List<Equation> gaveWay,
+            List<Equation> redundant) {
+        this.plant = plant;
+        this.givenVariables = List.copyOf(givenVariables);
+        this.given = given;
+        this.active = active;
+        this.entries = List.copyOf(entries);
+        this.system = system;
+        this.assumptions = List.copyOf(assumptions);
+        this.gaveWay = List.copyOf(gaveWay);
+        this.redundant = List.copyOf(redundant);
+        starts = new NeighbourStarts(plant, entries, given);
+    }
+
+    /** {@return the plant} */
+    public Plant plant() {
+        return plant;
+    }
+
+    /** {@return the assumptions that hold in every solution} */
+    public List<Equation> assumptions() {
+        return assumptions;
+    }
+
+    /** {@return the assumptions that gave way to given values} */
+    public List<Equation> assumptionsGivenWay() {
+        return gaveWay;
+    }
+
+    /** {@return the mass balances that follow from others and are only checked} */
+    public List<Equation> redundantBalances() {
+        return redundant;
+    }
+
+    /** {@return how many equations each block has, in the order of solving} */
+    public List<Integer> blockSizes() {
+        return system.blocks().stream().map(block -> block.length).toList();
+    }
+
+    boolean isActive(int slot) {
+        return active[slot];
+    }
+
+    boolean isGiven(int slot) {
+        return given[slot];
+    }
+
+    EquationSystem system() {
+        return system;
+    }
+
+    List<Planner.Entry> entries() {
+        return entries;
+    }
+
+    List<Variable<?>> givenVariables() {
+        return givenVariables;
+    }
+
+    Solution solve(Specification specification, SolveOptions options) {
+        final Workspace w = system.workspace(List.of());
+        for (Variable<?> variable : givenVariables) {
+            w.set(plant.slotOf(variable), specification.si(variable));
+        }
+        final int blocks = Math.max(1, system.blocks().size());
+        final Limits limits = new Limits(
+                System.nanoTime() + options.limit().toNanos(),
+                options.cancelled(),
+                done -> options.progress().done((double) done / blocks),
+                options.seed(),
+                options.restarts());
+        final BlockSolver solver = new BlockSolver(system, w, given, starts, limits);
+        final Solution start = options.start();
+        try {
+            if (start == null) {
+                solver.solveCold();
+            } else {
+                warm(start, w);
+                solver.solveWarm();
+            }
+        } catch (BlockFailure failure) {
+            throw explain(failure, w);
+        }
+        double largest = 0;
+        for (int[] block : system.blocks()) {
+            for (int equation : block) {
+                largest = Math.max(largest, solver.scaledResidual(equation));
+            }
+        }
+        if (solver.anyOutsideRange()) {
+            throw outsideRange(w);
+        }
+        requireSettledPhases(w);
+        final Solution solution = new Solution(this, specification, w.copyOfValues(), largest);
+        if (options.secondLaw() == SolveOptions.SecondLaw.ENFORCED) {
+            final List<String> findings = solution.violations();
+            if (!findings.isEmpty()) {
+                throw new PlantSolveException(
+                        PlantSolveException.Reason.IMPOSSIBLE,
+                        "plant \"" + plant.name() + "\": no real machine can do this: " + String.join("; ", findings)
+                                + ". Change a given value, or solve with SecondLaw.REPORTED to look at the numbers",
+                        List.of(),
+                        List.of());
+            }
+        }
+        return solution;
+    }
+
+    private void warm(Solution start, Workspace w) {
+        if (start.plan().plant != plant) {
+            throw new IllegalArgumentException("the start is a solution of another plant");
+        }
+        for (int slot = 0; slot < active.length; slot++) {
+            if (active[slot] && !given[slot]) {
+                w.set(slot, start.si(slot));
+            }
+        }
+    }
+
+    /** A temperature given at exactly the saturation pressure settles no state. */
+    private void requireSettledPhases(Workspace w) {
+        for (Layout.StreamState state : plant.layout().states) {
+            final int t = state.slot(SlotRole.TEMPERATURE);
+            final SaturationModel saturation = state.model().saturation();
+            if (saturation == null
+                    || !given[t]
+                    || given[state.slot(SlotRole.VAPOUR_FRACTION)]
+                    || !solvedDirectly(state)) {
+                continue;
+            }
+            final double temperature = w.get(t);
+            if (temperature < saturation.criticalTemperature()
+                    && Math.abs(w.get(state.slot(SlotRole.PRESSURE)) / saturation.pressure(temperature) - 1) < 1e-7) {
+                throw new PlantSolveException(
+                        PlantSolveException.Reason.UNDETERMINED,
+                        "plant \"" + plant.name() + "\": " + state.port().temperature()
+                                + " is the saturation temperature at the pressure there, so it does not tell liquid from"
+                                + " vapour; give " + state.port().vapourFraction() + " instead",
+                        List.of(),
+                        List.of(state.port().enthalpy()));
+            }
+        }
+    }
+
+    private boolean solvedDirectly(Layout.StreamState state) {
+        for (int e = 0; e < entries.size(); e++) {
+            if (system.matched()[e] == state.slot(SlotRole.ENTHALPY)
+                    && system.equations().get(e) == entries.get(e).direct()) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private PlantSolveException outsideRange(Workspace w) {
+        for (Layout.StreamState state : plant.layout().states) {
+            final double p = w.get(state.slot(SlotRole.PRESSURE));
+            final double h = w.get(state.slot(SlotRole.ENTHALPY));
+            try {
+                state.model().atPressureEnthalpy(p, h, new lostwork.fluid.StatePoint());
+            } catch (lostwork.quantity.OutOfRangeException e) {
+                return new PlantSolveException(
+                        PlantSolveException.Reason.OUTSIDE_RANGE,
+                        "plant \"" + plant.name() + "\": the given values lead out of the range of "
+                                + state.model().name() + " at " + state.port() + ": " + e.getMessage(),
+                        List.of(),
+                        List.of(state.port().pressure(), state.port().enthalpy()));
+            }
+        }
+        return new PlantSolveException(
+                PlantSolveException.Reason.OUTSIDE_RANGE,
+                "plant \"" + plant.name() + "\": an ideal state of a machine lies outside the range of its fluid; "
+                        + "look at the outlet pressures that are given",
+                List.of(),
+                List.of());
+    }
+
+    private PlantSolveException explain(BlockFailure failure, Workspace w) {
+        final int[] block = failure.equations();
+        final double[] residuals = failure.residuals();
+        final List<Equation> worst = IntStream.range(0, block.length)
+                .boxed()
+                .sorted(Comparator.comparingDouble(i -> -residuals[i]))
+                .map(i -> entries.get(block[i]).equation())
+                .toList();
+        final List<Variable<?>> unknowns = Arrays.stream(block)
+                .mapToObj(e -> variableOf(system.matched()[e]))
+                .collect(java.util.stream.Collectors.toCollection(ArrayList::new));
+        final String head = "plant \"" + plant.name() + "\": ";
+        return switch (failure.reason()) {
+            case SINGULAR -> singular(head, failure, unknowns);
+            case OUT_OF_TIME ->
+                new PlantSolveException(
+                        PlantSolveException.Reason.OUT_OF_TIME,
+                        head + "the time limit ran out in block " + (failure.block() + 1) + " of "
+                                + system.blocks().size() + "; raise it with SolveOptions.within(...)",
+                        worst,
+                        unknowns);
+            case CANCELLED ->
+                new PlantSolveException(
+                        PlantSolveException.Reason.CANCELLED, head + "cancelled by the caller", worst, unknowns);
+            default ->
+                new PlantSolveException(
+                        PlantSolveException.Reason.NOT_MET,
+                        head + "no values of " + Diagnosis.join(unknowns) + " within their bounds meet "
+                                + describeWorst(block, residuals, w)
+                                + ". Check the given values that these equations use: "
+                                + Diagnosis.join(givenIn(block)),
+                        worst,
+                        unknowns);
+        };
+    }
+
+    private String describeWorst(int[] block, double[] residuals, Workspace w) {
+        final List<String> parts = new ArrayList<>();
+        IntStream.range(0, block.length)
+                .boxed()
+                .sorted(Comparator.comparingDouble(i -> -residuals[i]))
+                .limit(3)
+                .forEach(i -> parts.add("\"" + entries.get(block[i]).equation() + "\" (missed by "
+                        + String.format(Locale.ROOT, "%.1e", residuals[i]) + " of its scale)"));
+        return String.join(" and ", parts);
+    }
+
+    private PlantSolveException singular(String head, BlockFailure failure, List<Variable<?>> unknowns) {
+        final int[] block = failure.equations();
+        final List<Equation> dependent = new ArrayList<>();
+        final List<Variable<?>> free = new ArrayList<>();
+        for (int i = 0; i < block.length; i++) {
+            if (Math.abs(failure.dependency()[i]) > 0.05) {
+                dependent.add(entries.get(block[i]).equation());
+            }
+            if (Math.abs(failure.freedom()[i]) > 0.05) {
+                free.add(unknowns.get(i));
+            }
+        }
+        return new PlantSolveException(
+                PlantSolveException.Reason.UNDETERMINED,
+                head + "the given values do not determine " + Diagnosis.join(free) + ": "
+                        + Diagnosis.join(
+                                dependent.stream().map(e -> "\"" + e + "\"").toList())
+                        + (dependent.size() > 1 ? " say the same there" : " does not depend on it there")
+                        + ". Give one of the former, and release one of "
+                        + Diagnosis.join(givenIn(block)),
+                dependent,
+                free);
+    }
+
+    /** The given variables that occur in some equations, most recently given first. */
+    private List<Variable<?>> givenIn(int[] block) {
+        final List<Variable<?>> found = new ArrayList<>();
+        for (int i = givenVariables.size() - 1; i >= 0; i--) {
+            final int slot = plant.slotOf(givenVariables.get(i));
+            if (Arrays.stream(block).anyMatch(e -> entries.get(e).tape().placeOf(slot) >= 0)) {
+                found.add(givenVariables.get(i));
+            }
+        }
+        return found;
+    }
+
+    private Variable<?> variableOf(int slot) {
+        return plant.layout().slots.get(slot).variable();
+    }
+}
