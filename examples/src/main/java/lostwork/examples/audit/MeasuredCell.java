@@ -19,6 +19,7 @@ import lostwork.quantity.ScalarQuantity;
 import lostwork.quantity.Temperature;
 import lostwork.quantity.TemperatureSpan;
 import lostwork.quantity.Unit;
+import lostwork.quantity.UnreadableQuantityException;
 import lostwork.quantity.VolumeFlow;
 
 /**
@@ -171,14 +172,19 @@ final class MeasuredCell {
             return new SurveyFlow.ByNormalVolume(
                     MolarFlow.normalCubicMetresPerHour(value, condition(words[0])), condition(words[0]), basis(words));
         }
-        if (unit.contains("m³")
-                || unit.contains("m3")
-                || unit.contains("ft")
-                || unit.startsWith("L")
-                || unit.startsWith("l/")) {
+        if (isUnitOfVolumeFlow(unit)) {
             return new SurveyFlow.ByVolume(read(VolumeFlow.KIND, unit, flowUnits()));
         }
         return new SurveyFlow.ByMass(read(MassFlow.KIND, unit, flowUnits()));
+    }
+
+    private static boolean isUnitOfVolumeFlow(String symbol) {
+        try {
+            VolumeFlow.KIND.unit(symbol);
+            return true;
+        } catch (UnreadableQuantityException e) {
+            return false;
+        }
     }
 
     private static NormalCondition condition(String unit) {
@@ -207,18 +213,13 @@ final class MeasuredCell {
 
     private <Q extends ScalarQuantity<Q, D>, D extends LinearQuantity<D>> Q read(
             QuantityKind<Q, D> kind, String symbol, String accepted) {
-        for (Unit<Q> known : kind.units()) {
-            if (known.symbol().equals(symbol) || known.spellings().contains(symbol)) {
-                return ofUnit(kind, known);
-            }
+        if (symbol.isEmpty()) {
+            throw unreadableUnit(kind.name(), accepted);
         }
-        throw unreadableUnit(kind.name(), accepted);
-    }
-
-    private <Q extends ScalarQuantity<Q, D>, D extends LinearQuantity<D>> Q ofUnit(
-            QuantityKind<Q, D> kind, Unit<Q> known) {
         try {
-            return kind.ofSi(known.toSi(value));
+            return kind.parse(value + " " + symbol);
+        } catch (UnreadableQuantityException e) {
+            throw unreadableUnit(kind.name(), accepted);
         } catch (IllegalArgumentException e) {
             throw new CellRefusedException("a " + kind.name() + " of " + this + " does not exist", "a possible value");
         }

@@ -69,7 +69,7 @@ sealed interface Medium {
     record FlueGas(SurveyFuel fuel, AirSupply air) implements Medium {
         @Override
         public String label() {
-            return "flue gas of " + fuel.label();
+            return fuel.label() + " flue gas";
         }
 
         @Override

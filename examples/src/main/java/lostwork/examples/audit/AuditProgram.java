@@ -1,0 +1,126 @@
+package lostwork.examples.audit;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.PrintStream;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import lostwork.quantity.OutOfRangeException;
+
+/** The audit from the arguments to the files, without the process around it. */
+final class AuditProgram {
+    static final int ALL_GOOD = 0;
+    static final int SOME_LINES_REFUSED = 1;
+    static final int NOTHING_DONE = 2;
+
+    private static final String BUNDLED_SURVEY = "glassworks-survey.csv";
+    private static final String BUNDLED_SITE = "glassworks-site.txt";
+
+    private final PrintStream out;
+    private final PrintStream err;
+
+    /**
+     * Creates the program.
+     *
+     * @param out where the report goes
+     * @param err where problems and progress go
+     */
+    AuditProgram(PrintStream out, PrintStream err) {
+        this.out = out;
+        this.err = err;
+    }
+
+    /**
+     * Runs the audit.
+     *
+     * @param arguments the words of the command line
+     * @return the exit code that {@code --help} explains
+     */
+    int run(String... arguments) {
+        try {
+            return run(AuditArguments.of(arguments));
+        } catch (RefusedInputException e) {
+            err.println(e.getMessage());
+            err.println("Nothing was computed. --help tells how to call the program and how to write its files.");
+            return NOTHING_DONE;
+        }
+    }
+
+    private int run(AuditArguments arguments) {
+        if (arguments.help()) {
+            out.print(Help.text());
+            return ALL_GOOD;
+        }
+        final SourceText siteText = arguments.site().map(SourceText::read).orElseGet(() -> bundled(BUNDLED_SITE));
+        final Site site = SiteReader.read(siteText);
+        final SourceText surveyText = arguments.survey().map(SourceText::read).orElseGet(() -> bundled(BUNDLED_SURVEY));
+        final Survey survey = SurveyReader.read(surveyText, site.ambientPressure());
+        final OutputFolder folder = OutputFolder.prepare(arguments.output());
+
+        final AuditResult result = compute(site, survey);
+        result.problems().forEach(problem -> err.println(problem));
+        if (result.ranked().isEmpty()) {
+            throw new RefusedInputException(survey.file() + ": every line is refused.");
+        }
+        final String report = AuditReport.of(result);
+        final Map<String, String> files = new LinkedHashMap<>();
+        files.put("report.txt", report);
+        files.put("streams.csv", StreamCsv.of(result));
+        files.put("streams.json", StreamJson.of(result));
+        if (arguments.survey().isEmpty()) {
+            files.put("example-survey.csv", bundledText(BUNDLED_SURVEY));
+        }
+        if (arguments.site().isEmpty()) {
+            files.put("example-site.txt", bundledText(BUNDLED_SITE));
+        }
+        folder.write(files);
+        out.print(report);
+        out.println();
+        out.println("Written to " + folder.path() + ": " + String.join(", ", files.keySet()));
+        return result.problems().isEmpty() ? ALL_GOOD : SOME_LINES_REFUSED;
+    }
+
+    private AuditResult compute(Site site, Survey survey) {
+        final StreamAnalysis analysis = new StreamAnalysis(site);
+        final Progress progress = new Progress(err, System::nanoTime);
+        final List<StreamFigures> figures = new ArrayList<>();
+        final List<Problem> problems = new ArrayList<>(survey.problems());
+        for (SurveyLine stream : survey.lines()) {
+            try {
+                figures.add(analysis.of(stream));
+            } catch (CellRefusedException e) {
+                problems.add(new Problem(survey.file(), stream.line(), 0, e.what(), e.accepted()));
+            } catch (OutOfRangeException e) {
+                problems.add(new Problem(
+                        survey.file(),
+                        stream.line(),
+                        0,
+                        "the state of the stream is outside what the property model covers: " + e.getMessage(),
+                        "temperatures and a pressure within that range"));
+            }
+            progress.report(figures.size(), survey.lines().size(), "streams");
+        }
+        problems.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
+        return new AuditResult(site, survey, figures, problems);
+    }
+
+    private static SourceText bundled(String name) {
+        return SourceText.of(name, bundledText(name).getBytes(StandardCharsets.UTF_8));
+    }
+
+    private static String bundledText(String name) {
+        try (InputStream in = AuditProgram.class.getResourceAsStream(name)) {
+            if (in == null) {
+                throw new IllegalStateException("the bundled file " + name + " is missing from the program");
+            }
+            return new String(in.readAllBytes(), StandardCharsets.UTF_8);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+}

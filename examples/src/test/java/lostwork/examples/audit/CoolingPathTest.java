@@ -1,0 +1,72 @@
+package lostwork.examples.audit;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+
+import lostwork.exergy.ReferenceEnvironment;
+import lostwork.fluid.Fluid;
+import lostwork.fluid.gas.DryAir;
+import lostwork.fluid.gas.PerfectGas;
+import lostwork.quantity.MolarMass;
+import lostwork.quantity.Pressure;
+import lostwork.quantity.SpecificHeatCapacity;
+import lostwork.quantity.Temperature;
+import org.junit.jupiter.api.Test;
+
+class CoolingPathTest {
+    private static final Pressure PRESSURE = Pressure.mbar(1013);
+    private static final ReferenceEnvironment AMBIENT = ReferenceEnvironment.of(Temperature.celsius(12), PRESSURE);
+
+    @Test
+    void ofAPerfectGasAgreesWithTheClosedForms() {
+        final double cp = 1004.5;
+        final Fluid gas = PerfectGas.of(
+                "test gas", MolarMass.gramsPerMole(28.96), SpecificHeatCapacity.joulesPerKilogramKelvin(cp));
+        final double t0 = 285.15;
+        for (double hot : new double[] {300, 450, 900, 1500}) {
+            for (double cold : new double[] {285.15, 295}) {
+                final CoolingPath path = new CoolingPath(gas, PRESSURE, Temperature.kelvin(cold), AMBIENT);
+                final Temperature supply = Temperature.kelvin(hot);
+                final double heat = cp * (hot - cold);
+                final double most = heat - t0 * cp * Math.log(hot / cold);
+                final double likely = heat - 2 * cp * Math.sqrt(t0) * (Math.sqrt(hot) - Math.sqrt(cold));
+                assertEquals(heat, path.heatFrom(supply).si(), 1e-9 * heat);
+                assertEquals(most, path.reversibleWorkFrom(supply).si(), 1e-9 * heat);
+                assertEquals(likely, path.endoreversibleWorkFrom(supply).si(), 1e-9 * heat);
+            }
+        }
+    }
+
+    @Test
+    void likelyWorkLiesBetweenHalfAndAllOfTheReversibleWork() {
+        // (1 - sqrt(x)) / (1 - x) = 1 / (1 + sqrt(x)), with x = T0/T from 0 to 1
+        for (double hot = 20; hot <= 1500; hot += 37) {
+            final CoolingPath path = new CoolingPath(DryAir.standard(), PRESSURE, Temperature.celsius(15), AMBIENT);
+            final double share =
+                    path.endoreversibleWorkFrom(Temperature.celsius(hot)).si()
+                            / path.reversibleWorkFrom(Temperature.celsius(hot)).si();
+            assertEquals(0.75, share, 0.25, "supply " + hot + " °C");
+        }
+    }
+
+    /**
+     * Efficiencies of F. L. Curzon and B. Ahlborn, Am. J. Phys. 43 (1975) 22-24, table 1, from memory: 565 and 25 °C
+     * 40 %, 300 and 25 °C 28 %, 250 and 80 °C 17.5 %. The printed temperatures give 40.36, 27.88 and 17.84 %; half a
+     * percent covers the rounding of the paper.
+     */
+    @Test
+    void aThinSliceHasTheEfficiencyOfThePaper() {
+        assertEquals(40, thinSlicePercent(565, 25), 0.5);
+        assertEquals(28, thinSlicePercent(300, 25), 0.5);
+        assertEquals(17.5, thinSlicePercent(250, 80), 0.5);
+    }
+
+    private static double thinSlicePercent(double hot, double ambient) {
+        final ReferenceEnvironment surroundings = ReferenceEnvironment.of(Temperature.celsius(ambient), PRESSURE);
+        final CoolingPath path =
+                new CoolingPath(DryAir.standard(), PRESSURE, Temperature.celsius(hot - 0.01), surroundings);
+        final Temperature supply = Temperature.celsius(hot);
+        return 100
+                * path.endoreversibleWorkFrom(supply).si()
+                / path.heatFrom(supply).si();
+    }
+}
