@@ -140,7 +140,7 @@ public final class ReferenceEnvironment implements Serializable {
      *
      * @param atmosphere the composition
      * @throws OutOfRangeException if there is more water vapour than saturated air holds, or the ambient temperature is
-     *     outside 173.15 K to 473.15 K
+     *     outside 130 K to 647.096 K
      */
     public ReferenceEnvironment withAtmosphere(AirComposition atmosphere) {
         final double share = atmosphere.fraction(AtmosphericGas.WATER);
@@ -171,9 +171,9 @@ public final class ReferenceEnvironment implements Serializable {
     /**
      * {@return the partial pressure of water vapour: relative humidity times saturation pressure}
      *
-     * <p>Saturation pressure over liquid water or, below 273.16 K, over ice by R. W. Hyland and A. Wexler, ASHRAE
-     * Transactions 89 (2A) (1983) 500-519, for 173.15 K to 473.15 K. The small increase by the pressure of the air (0.4 % at
-     * 1 bar, the enhancement factor) is not counted.
+     * <p>Saturation pressure over liquid water by IAPWS SR1-86(1992) (W. Wagner, A. Pruss, Journal of Physical and Chemical
+     * Reference Data 22 (1993) 783), below 273.16 K over ice by IAPWS R14-08(2011); 130 K to 647.096 K. The small increase
+     * by the pressure of the air (0.4 % at 1 bar, the enhancement factor) is not counted.
      *
      * @throws IncompleteEnvironmentException if the relative humidity has not been stated
      * @throws OutOfRangeException if the ambient temperature is outside the range of the formula, or the vapour alone would
@@ -206,7 +206,7 @@ public final class ReferenceEnvironment implements Serializable {
      * partial pressure}
      *
      * @throws IncompleteEnvironmentException if humidity or dry air have not been stated
-     * @throws OutOfRangeException if the ambient temperature is outside 173.15 K to 473.15 K, or the vapour alone would have
+     * @throws OutOfRangeException if the ambient temperature is outside 130 K to 647.096 K, or the vapour alone would have
      *     more than the ambient pressure
      */
     public AirComposition atmosphere() {
@@ -217,6 +217,18 @@ public final class ReferenceEnvironment implements Serializable {
         }
         return dryAir.with(
                 AtmosphericGas.WATER, Ratio.fraction(waterVapourPressure().si() / pressure.si()));
+    }
+
+    /**
+     * {@return the partial pressure of a gas in the atmosphere, 0 if it is not present}
+     *
+     * @param gas the gas
+     * @throws IncompleteEnvironmentException if humidity or dry air have not been stated
+     * @throws OutOfRangeException if the ambient temperature is outside 130 K to 647.096 K, or the vapour alone would have
+     *     more than the ambient pressure
+     */
+    public Pressure partialPressure(AtmosphericGas gas) {
+        return pressure.times(atmosphere().moleFraction(gas));
     }
 
     /**

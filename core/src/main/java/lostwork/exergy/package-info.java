@@ -33,7 +33,7 @@
  * <p>Exergy is zero at the restricted dead state: the same matter at {@code T0, p0}, unmixed and unreacted. There is no
  * default environment. A temperature of 0 K does not exist as a {@link lostwork.quantity.Temperature}, so that no law is
  * asked about it. The range of a state is that of its property model. The humidity of the environment needs an ambient
- * temperature of 173.15 K to 473.15 K.
+ * temperature of 130 K to 647.096 K.
  *
  * <h2>Sources</h2>
  * <ul>
