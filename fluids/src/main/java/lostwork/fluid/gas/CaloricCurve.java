@@ -279,7 +279,7 @@ final class CaloricCurve {
     /** {@return the end of the range that a value not inside it stands for; refuses one that stands for none} */
     private double end(
             double wanted, double least, double most, double scale, String name, String unit, String limitedBy) {
-        final double rounding = ROUNDING * (Math.abs(wanted) + scale);
+        final double rounding = ROUNDING * (Math.max(Math.abs(least), Math.abs(most)) + scale);
         if (Math.abs(wanted - least) <= rounding) {
             return lowest();
         }

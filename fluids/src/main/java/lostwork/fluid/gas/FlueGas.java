@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Locale;
 import lostwork.fluid.Provenance;
 import lostwork.quantity.OutOfRangeException;
-import lostwork.quantity.Pressure;
 import lostwork.quantity.Ratio;
 import lostwork.quantity.Temperature;
 
@@ -136,51 +135,6 @@ public final class FlueGas extends IdealGas {
     /** {@return the mole fraction of oxygen in the wet gas} */
     public Ratio oxygenInWetGas() {
         return composition().moleFraction(Species.O2);
-    }
-
-    /**
-     * {@return the temperature at which water begins to condense, for the ideal mixture over pure water or ice}
-     *
-     * @param pressure the absolute pressure of the gas
-     * @throws OutOfRangeException if the gas holds no water, or more than the vapour pressure formula covers
-     */
-    public Temperature waterDewPoint(Pressure pressure) {
-        return Temperature.kelvin(WaterVapourPressure.temperature(composition().fraction(Species.H2O) * pressure.si()));
-    }
-
-    /**
-     * {@return the temperature at which sulfuric acid begins to condense, by {@link AcidDewPoint}}
-     *
-     * @param pressure the absolute pressure of the gas
-     * @param conversion the part of the sulfur dioxide, in moles, that oxidises to trioxide; common practice, no source:
-     *     1 % to 5 %, more with vanadium in the ash
-     * @throws OutOfRangeException if the gas holds no sulfur, or the conversion is not above 0 and at most 1
-     */
-    public Temperature acidDewPoint(Pressure pressure, Ratio conversion) {
-        if (!(conversion.si() > 0 && conversion.si() <= 1)) {
-            throw new OutOfRangeException(
-                    "conversion of sulfur dioxide",
-                    conversion.si(),
-                    0,
-                    1,
-                    "1",
-                    "a share above 0",
-                    "without trioxide there is no acid; ask for the water dew point");
-        }
-        final double sulfur = composition().fraction(Species.SO2);
-        if (!(sulfur > 0)) {
-            throw new OutOfRangeException(
-                    "mole fraction of SO2",
-                    sulfur,
-                    Double.MIN_VALUE,
-                    1,
-                    "1",
-                    "acid dew point",
-                    "a gas without sulfur has no acid dew point; ask for the water dew point");
-        }
-        return AcidDewPoint.ofSulfuricAcid(
-                Pressure.pascal(composition().fraction(Species.H2O) * pressure.si()),
-                Pressure.pascal(sulfur * conversion.si() * pressure.si()));
     }
 
     /**

@@ -4,6 +4,7 @@ import java.util.EnumMap;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import lostwork.quantity.EmissionFactor;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Ratio;
 import lostwork.quantity.SpecificEnergy;
@@ -125,6 +126,16 @@ public final class Fuel {
      */
     public Ratio massFraction(Element element) {
         return Ratio.fraction(moles(element) * element.atomicMassKilogramPerMole());
+    }
+
+    /** {@return the mass of carbon dioxide per mass of fuel that complete combustion leaves, all carbon counted as burnt} */
+    public Ratio carbonDioxidePerFuel() {
+        return Ratio.fraction(moles(Element.CARBON) * Species.CO2.molarMassKilogramPerMole());
+    }
+
+    /** {@return the mass of carbon dioxide per heat of combustion, by the lower heating value} */
+    public EmissionFactor emissionFactor() {
+        return EmissionFactor.kilogramsPerJoule(carbonDioxidePerFuel().si() / lowerHeatingValueJoulePerKilogram());
     }
 
     /** {@return name and lower heating value} */

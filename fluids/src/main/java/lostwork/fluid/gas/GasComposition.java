@@ -119,6 +119,25 @@ public final class GasComposition {
         return builder.buildNormalised();
     }
 
+    /**
+     * {@return the composition in which one species has a share of the moles, the others keeping their proportions, such as
+     * the wet gas from a dry analysis and its water}
+     *
+     * @param added the species, present or not
+     * @param share its mole fraction in the result, 0 to less than 1
+     * @throws OutOfRangeException if the share is outside 0 to 1
+     * @throws IllegalArgumentException if nothing else remains
+     */
+    public GasComposition with(Species added, Ratio share) {
+        final double x = MoleFraction.of(added, share.si()).fraction();
+        final GasComposition others = without(added);
+        final Builder builder = byMole();
+        for (int i = 0; i < others.fractions.length; i++) {
+            builder.add(others.species.get(i), others.fractions[i] * (1 - x));
+        }
+        return builder.add(added, x).buildNormalised();
+    }
+
     @Override
     public boolean equals(Object other) {
         return other instanceof GasComposition that

@@ -1,6 +1,7 @@
 package lostwork.fluid.gas;
 
 import java.util.Locale;
+import lostwork.exergy.ReferenceEnvironment;
 import lostwork.fluid.Provenance;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Pressure;
@@ -15,7 +16,7 @@ import lostwork.solve.BracketedRoot;
  * <pre>{@code
  * var air = HumidAir.of(celsius(12), mbar(1013), percent(70));    // as measured at the intake
  * air.state(celsius(300), bar(8));                                // the same air, compressed
- * air.dewPoint(bar(8));
+ * air.waterDewPoint(bar(8));
  * }</pre>
  *
  * <h2>Saturation</h2>
@@ -25,7 +26,7 @@ import lostwork.solve.BracketedRoot;
  *
  * <h2>Limits of the model</h2>
  * <p>More than 100 % relative humidity is refused when the air is made. The air that is made keeps its water: cooled
- * below {@link #dewPoint} or compressed beyond it, its states are those of a supersaturated vapour, which does not
+ * below {@link #waterDewPoint} or compressed beyond it, its states are those of a supersaturated vapour, which does not
  * condense. Ask {@link #relativeHumidity}, which then answers more than 100 %.
  */
 public final class HumidAir extends IdealGas {
@@ -76,6 +77,19 @@ public final class HumidAir extends IdealGas {
                     "state it in percent with percent(70), or as a fraction with fraction(0.7)");
         }
         return ofWaterPressure(relativeHumidity.si() * WaterVapourPressure.pascal(temperature.si()), pressure.si());
+    }
+
+    /**
+     * {@return the air of a reference environment, with the water vapour that the environment states}
+     *
+     * <p>The dry part is that of {@link DryAir#standard}, whatever dry air the environment names.
+     *
+     * @param environment the environment, its relative humidity stated
+     * @throws lostwork.exergy.IncompleteEnvironmentException if the humidity has not been stated
+     */
+    public static HumidAir of(ReferenceEnvironment environment) {
+        return ofWaterPressure(
+                environment.waterVapourPressure().si(), environment.pressure().si());
     }
 
     /**
@@ -187,16 +201,6 @@ public final class HumidAir extends IdealGas {
      */
     public Ratio relativeHumidity(Temperature temperature, Pressure pressure) {
         return Ratio.fraction(waterPressure(pressure.si()) / WaterVapourPressure.pascal(temperature.si()));
-    }
-
-    /**
-     * {@return the temperature at which this air is saturated}
-     *
-     * @param pressure the absolute pressure
-     * @throws OutOfRangeException if the air is dry: it has no dew point
-     */
-    public Temperature dewPoint(Pressure pressure) {
-        return Temperature.kelvin(WaterVapourPressure.temperature(waterPressure(pressure.si())));
     }
 
     /**

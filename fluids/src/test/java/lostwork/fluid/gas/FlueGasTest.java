@@ -112,6 +112,56 @@ class FlueGasTest {
         }
     }
 
+    /** The heat that cools the flue gas from the flame to 298.15 K is the heating value, the reactants being at 298.15 K. */
+    @Test
+    void theFlameHoldsTheHeatingValue() {
+        for (double excess : new double[] {0, 0.5, 3}) {
+            final FlueGas gas = FlueGas.of(OIL, excessAir(Ratio.fraction(excess)));
+            final var flame = gas.state(gas.adiabaticFlameTemperature(kelvin(298.15)), bar(1));
+            final var cold = gas.state(kelvin(298.15), bar(1));
+            assertEquals(
+                    OIL.lowerHeatingValue().si(),
+                    gas.gasPerFuel().si()
+                            * flame.enthalpy().minus(cold.enthalpy()).si(),
+                    1e-9 * 4e7);
+        }
+    }
+
+    @Test
+    void humidAirBringsItsWater() {
+        final HumidAir humid = HumidAir.ofHumidityRatio(Ratio.fraction(0.02));
+        final FlueGas dry = FlueGas.of(NATURAL_GAS, excessAir(percent(18)));
+        final FlueGas wet = FlueGas.of(NATURAL_GAS, excessAir(percent(18)).from(humid));
+        final double dryWater = dry.gasPerFuel().si()
+                * dry.composition().massFraction(Species.H2O).si();
+        final double wetWater = wet.gasPerFuel().si()
+                * wet.composition().massFraction(Species.H2O).si();
+        assertEquals(0.02 / 1.02 * wet.airPerFuel().si(), wetWater - dryWater, 1e-12);
+        assertEquals(dry.oxygenInDryGas().si(), wet.oxygenInDryGas().si(), 1e-14);
+        assertEquals(
+                0.18,
+                FlueGas.of(NATURAL_GAS, oxygenInWetGas(wet.oxygenInWetGas()).from(humid))
+                        .excessAir()
+                        .si(),
+                1e-12);
+        assertEquals(
+                0.18,
+                FlueGas.of(NATURAL_GAS, oxygenInDryGas(wet.oxygenInDryGas()).from(humid))
+                        .excessAir()
+                        .si(),
+                1e-12);
+    }
+
+    @Test
+    void refusesAirThatBurnsOrHoldsNoOxygen() {
+        assertThrows(IllegalArgumentException.class, () -> stoichiometric().from(IdealGas.of(Species.N2)));
+        final IdealGas foul = IdealGas.of(GasComposition.of(MoleFraction.oxygen(0.2), nitrogen(0.79), methane(0.01)));
+        assertTrue(assertThrows(
+                        IllegalArgumentException.class, () -> stoichiometric().from(foul))
+                .getMessage()
+                .contains("CH4"));
+    }
+
     @Test
     void oilLeavesAcidButGasDoesNot() {
         final FlueGas oil = FlueGas.of(OIL, excessAir(percent(20)));

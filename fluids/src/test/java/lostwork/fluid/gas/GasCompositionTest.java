@@ -66,6 +66,23 @@ class GasCompositionTest {
     }
 
     @Test
+    void wetsADryAnalysis() {
+        final GasComposition dry = GasComposition.of(nitrogen(0.8), oxygen(0.2));
+        final GasComposition wet = dry.with(Species.H2O, percent(15));
+        assertEquals(0.15, wet.moleFraction(Species.H2O).si(), 1e-15);
+        assertEquals(0.8 * 0.85, wet.moleFraction(Species.N2).si(), 1e-15);
+        assertEquals(0.8, wet.without(Species.H2O).moleFraction(Species.N2).si(), 1e-15);
+        assertEquals(
+                0.10,
+                wet.with(Species.H2O, percent(10)).moleFraction(Species.H2O).si(),
+                1e-15);
+        assertThrows(OutOfRangeException.class, () -> dry.with(Species.H2O, percent(101)));
+        assertThrows(
+                IllegalArgumentException.class,
+                () -> GasComposition.pure(Species.H2O).with(Species.H2O, percent(10)));
+    }
+
+    @Test
     void dropsWhatIsAbsent() {
         final GasComposition gas = GasComposition.of(nitrogen(1), oxygen(0));
         assertEquals(List.of(Species.N2), gas.species());

@@ -20,7 +20,7 @@ class HumidAirTableTest {
         final HumidAir air = HumidAir.ofWetBulb(celsius(40), celsius(20), kilopascal(101.325));
         assertEquals(6.5, 1000 * air.humidityRatio().si(), 0.15);
         assertEquals(56.7, air.enthalpyPerDryAir(celsius(40)).inKilojoulesPerKilogram(), 0.05);
-        assertEquals(7, air.dewPoint(kilopascal(101.325)).inCelsius(), 0.5);
+        assertEquals(7, air.waterDewPoint(kilopascal(101.325)).inCelsius(), 0.5);
         assertEquals(14, air.relativeHumidity(celsius(40), kilopascal(101.325)).inPercent(), 0.5);
         final double perDryAir = (1 + air.humidityRatio().si())
                 * air.state(celsius(40), kilopascal(101.325)).volume().si();

@@ -9,6 +9,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import lostwork.exergy.ReferenceEnvironment;
 import lostwork.quantity.OutOfRangeException;
 import org.junit.jupiter.api.Test;
 
@@ -21,7 +22,7 @@ class HumidAirTest {
                 assertEquals(phi, air.relativeHumidity(celsius(t), mbar(1013)).si(), 1e-12);
                 assertEquals(
                         air.humidityRatio().si(),
-                        HumidAir.ofDewPoint(air.dewPoint(mbar(1013)), mbar(1013))
+                        HumidAir.ofDewPoint(air.waterDewPoint(mbar(1013)), mbar(1013))
                                 .humidityRatio()
                                 .si(),
                         1e-11 * air.humidityRatio().si());
@@ -58,7 +59,21 @@ class HumidAirTest {
     void dryAirIsItsLimit() {
         final HumidAir dry = HumidAir.ofHumidityRatio(fraction(0));
         assertEquals(DryAir.standard().composition(), dry.composition());
-        assertThrows(OutOfRangeException.class, () -> dry.dewPoint(bar(1)));
+        assertThrows(OutOfRangeException.class, () -> dry.waterDewPoint(bar(1)));
+    }
+
+    /** The environment's own formula (Hyland and Wexler) and this package's agree to 0.1 % of the water. */
+    @Test
+    void isTheAirOfItsEnvironment() {
+        for (double t : new double[] {-15, 12, 40}) {
+            final var site = ReferenceEnvironment.of(celsius(t), mbar(1013)).withRelativeHumidity(percent(70));
+            final HumidAir air = HumidAir.of(site);
+            assertEquals(
+                    site.waterVapourPressure().si(),
+                    air.composition().moleFraction(Species.H2O).si() * 101_300,
+                    1e-10);
+            assertEquals(0.70, air.relativeHumidity(celsius(t), mbar(1013)).si(), 7e-4);
+        }
     }
 
     /** Water per mass: the balance of the composition. */
