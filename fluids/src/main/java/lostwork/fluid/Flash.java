@@ -114,16 +114,21 @@ final class Flash {
 
     static void temperatureVapourFraction(FluidModel model, double temperature, double fraction, StatePoint out) {
         final SaturationModel saturation = requireSaturationAt(model, temperature);
-        twoPhase(model, temperature, saturation.pressure(temperature), fraction, out);
+        twoPhase(model, saturation, temperature, saturation.pressure(temperature), fraction, out);
     }
 
     static void pressureVapourFraction(FluidModel model, double pressure, double fraction, StatePoint out) {
         final SaturationModel saturation = requireSaturationAtPressure(model, pressure);
-        twoPhase(model, saturation.temperature(pressure), pressure, fraction, out);
+        twoPhase(model, saturation, saturation.temperature(pressure), pressure, fraction, out);
     }
 
     private static void twoPhase(
-            FluidModel model, double temperature, double pressure, double fraction, StatePoint out) {
+            FluidModel model,
+            SaturationModel saturation,
+            double temperature,
+            double pressure,
+            double fraction,
+            StatePoint out) {
         if (!(fraction >= 0 && fraction <= 1)) {
             throw new OutOfRangeException("vapour fraction", fraction, 0, 1, "1", "lever rule", "");
         }
@@ -131,7 +136,7 @@ final class Flash {
         final StatePoint vapour = out.vapourSide();
         model.evaluate(temperature, pressure, PhaseSide.LIQUID, liquid);
         model.evaluate(temperature, pressure, PhaseSide.VAPOUR, vapour);
-        out.setTwoPhase(liquid, vapour, fraction);
+        out.setTwoPhase(liquid, vapour, fraction, saturation.pressureByTemperature(temperature));
     }
 
     static void saturatedAtTemperature(FluidModel model, double temperature, PhaseSide side, StatePoint out) {

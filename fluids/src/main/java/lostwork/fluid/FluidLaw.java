@@ -26,6 +26,8 @@ public enum FluidLaw {
     EQUAL_GIBBS_ENERGY("h' - T s' = h'' - T s'' on the saturation line"),
     /** The slope of the saturation line is (h″ − h′)/(T (v″ − v′)) (Clausius–Clapeyron). */
     CLAUSIUS_CLAPEYRON("dp/dT = (h'' - h')/(T (v'' - v')) on the saturation line"),
+    /** The stated slope of the saturation line is the slope of its pressure. */
+    SATURATION_SLOPE("the stated dp/dT is the slope of the saturation pressure"),
     /** The saturation temperature of a saturation pressure is the temperature one began with. */
     SATURATION_INVERSE("T(p(T)) = T on the saturation line"),
     /** A state found from a pair of properties has these two properties. */

@@ -6,9 +6,9 @@ public enum Phase {
     LIQUID("liquid"),
     /** Liquid and vapour in equilibrium. */
     TWO_PHASE("two-phase"),
-    /** Below the critical temperature, at or below the saturation pressure. */
+    /** At or below the saturation pressure; above the critical temperature, below the critical pressure. */
     VAPOUR("vapour"),
-    /** At or above the critical temperature of a fluid that has one. */
+    /** At or above the critical temperature and the critical pressure. */
     SUPERCRITICAL("supercritical"),
     /** A fluid whose model knows no other phase. */
     GAS("gas");

@@ -53,7 +53,8 @@ final class PressureFlash {
             search.start(boiling, highest, true, false, start(property, asked, ofVapour, vapour, guess), true);
             return search(model, pressure, property, asked, NO_LIQUID, search, out);
         }
-        out.setTwoPhase(liquid, vapour, (asked - ofLiquid) / (ofVapour - ofLiquid));
+        out.setTwoPhase(
+                liquid, vapour, (asked - ofLiquid) / (ofVapour - ofLiquid), saturation.pressureByTemperature(boiling));
         return Outcome.FOUND;
     }
 

@@ -31,8 +31,8 @@ final class PropertyTable {
         for (final Q value : values) {
             final String text = value.toString();
             final int blank = text.indexOf(' ');
-            numbers.add(text.substring(0, blank));
-            unit = text.substring(blank + 1);
+            numbers.add(blank < 0 ? text : text.substring(0, blank));
+            unit = blank < 0 ? "" : text.substring(blank + 1);
         }
         rows.add(new Row(symbol, numbers, unit));
         return this;
@@ -66,8 +66,17 @@ final class PropertyTable {
         }
         for (int i = 0; i < lines.length; i++) {
             text.append('\n').append(lines[i]).append(' ').append(rows.get(i).unit);
+            trimEnd(text);
         }
         return text.toString();
+    }
+
+    private static void trimEnd(StringBuilder text) {
+        int end = text.length();
+        while (text.charAt(end - 1) == ' ') {
+            end--;
+        }
+        text.setLength(end);
     }
 
     private void appendColumn(int column, StringBuilder[] lines, StringBuilder heading) {

@@ -80,6 +80,18 @@ final class SaturationCheck {
                 slope,
                 slope,
                 tolerance.saturation() + rounding);
+        final double stated = saturation.pressureByTemperature(temperature);
+        if (!Double.isNaN(stated)) {
+            findings.compare(
+                    FluidLaw.SATURATION_SLOPE,
+                    "the stated dp/dT in Pa/K",
+                    temperature,
+                    pressure,
+                    stated,
+                    slope,
+                    slope,
+                    tolerance.derivatives() + rounding);
+        }
         mixed.setTwoPhase(liquid, vapour, fraction);
         flashes.at(mixed);
     }

@@ -164,6 +164,18 @@ public final class StatePoint {
      * @param vapourFraction mass of vapour per total mass, 0 to 1
      */
     public void setTwoPhase(StatePoint liquid, StatePoint vapour, double vapourFraction) {
+        setTwoPhase(liquid, vapour, vapourFraction, Double.NaN);
+    }
+
+    /**
+     * Fills the point with a mixture of saturated liquid and saturated vapour, on a saturation line with a slope of its own.
+     *
+     * @param liquid saturated liquid, a single-phase point
+     * @param vapour saturated vapour, a single-phase point at the same temperature and pressure
+     * @param vapourFraction mass of vapour per total mass, 0 to 1
+     * @param pressureByTemperature slope dp/dT of the saturation line in Pa/K; NaN for the one of Clausius and Clapeyron
+     */
+    public void setTwoPhase(StatePoint liquid, StatePoint vapour, double vapourFraction, double pressureByTemperature) {
         final double x = vapourFraction;
         final double t = liquid.temperature;
         final double dv = vapour.volume - liquid.volume;
@@ -176,7 +188,7 @@ public final class StatePoint {
         heatCapacity = Double.POSITIVE_INFINITY;
         volumeByTemperature = Double.NaN;
         volumeByPressure = Double.NaN;
-        final double tByP = t * dv / dh;
+        final double tByP = Double.isNaN(pressureByTemperature) ? t * dv / dh : 1 / pressureByTemperature;
         temperatureByEnthalpy = 0;
         temperatureByPressureAtEnthalpy = tByP;
         volumeByEnthalpy = dv / dh;

@@ -46,7 +46,11 @@ final class TemperatureFlash {
             final double first = Double.isNaN(guess) ? boiling : guess;
             return searchGas(model, temperature, property, asked, lowest, boiling, false, true, first, out);
         }
-        out.setTwoPhase(liquid, vapour, (asked - ofLiquid) / (ofVapour - ofLiquid));
+        out.setTwoPhase(
+                liquid,
+                vapour,
+                (asked - ofLiquid) / (ofVapour - ofLiquid),
+                saturation.pressureByTemperature(temperature));
         return Outcome.FOUND;
     }
 

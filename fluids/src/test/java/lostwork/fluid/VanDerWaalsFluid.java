@@ -44,7 +44,7 @@ final class VanDerWaalsFluid implements FluidModel, SaturationModel {
         final double u = CV * t - A / v;
         final double s = CV * Math.log(t / TC) + R * Math.log((v - B) / B);
         final double cp = CV - t * byTemperature * byTemperature / byVolume;
-        final Phase phase = t >= TC ? Phase.SUPERCRITICAL : side == PhaseSide.LIQUID ? Phase.LIQUID : Phase.VAPOUR;
+        final Phase phase = phase(t, p, side);
         out.setSinglePhase(t, p, v, u + p * v, s, cp, -byTemperature / byVolume, 1 / byVolume, phase);
     }
 
@@ -64,11 +64,12 @@ final class VanDerWaalsFluid implements FluidModel, SaturationModel {
     }
 
     private static double series(double y) {
-        double above = 0, below = 0, odd = y;
-        for (int k = 1; k < 40; k++) {
+        double above = 0, below = 0, odd = y, four = 1;
+        for (int k = 1; k < 60 && 2 * k * odd > 1e-17 * above; k++) {
             odd *= y * y / ((2 * k) * (2 * k + 1));
+            four *= 4;
             above += 2 * k * odd;
-            below += odd * Math.pow(2, 2 * k);
+            below += four * odd;
         }
         return above / below;
     }

@@ -4,6 +4,13 @@ package lostwork.fluid;
 class VanDerWaalsFluidTest extends FluidContract {
     private final Fluid fluid = Fluid.of(new VanDerWaalsFluid());
 
+    VanDerWaalsFluidTest() {}
+
+    @Override
+    protected int states() {
+        return 1_000;
+    }
+
     @Override
     protected Fluid fluid() {
         return fluid;

@@ -100,14 +100,16 @@ final class If97Gibbs {
                 -gasConstant * tau * tau * w.tt,
                 volumeByTemperature,
                 volumeByPressure,
-                phase(t));
+                phase(t, pressure));
     }
 
-    private Phase phase(double temperature) {
+    private Phase phase(double temperature, double pressure) {
         if (region == 1) {
             return Phase.LIQUID;
         }
-        return temperature < If97Saturation.CRITICAL_TEMPERATURE_K ? Phase.VAPOUR : Phase.SUPERCRITICAL;
+        return temperature >= If97Saturation.CRITICAL_TEMPERATURE_K && pressure >= If97Saturation.CRITICAL_PRESSURE_PA
+                ? Phase.SUPERCRITICAL
+                : Phase.VAPOUR;
     }
 
     /** Evaluates the properties at a temperature in K and a pressure in Pa. */

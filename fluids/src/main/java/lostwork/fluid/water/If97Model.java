@@ -118,7 +118,7 @@ final class If97Model implements FluidModel {
         if (Double.isNaN(density)) {
             throw If97Failure.of("region 3", "T = " + temperature + " K, p = " + pressure + " Pa", 60);
         }
-        final Phase phase = supercritical ? Phase.SUPERCRITICAL : liquid ? Phase.LIQUID : Phase.VAPOUR;
+        final Phase phase = region3Phase(temperature, pressure, liquid);
         region3.evaluate(density, temperature, phase, w, out);
         out.pressure = pressure;
     }
@@ -215,12 +215,12 @@ final class If97Model implements FluidModel {
         if (!region3.atPressureEnthalpy(pressure, enthalpy, density, temperature, Phase.LIQUID, w, out)) {
             throw If97Failure.of("region 3", "p = " + pressure + " Pa, h = " + enthalpy + " J/kg", 60);
         }
-        out.phase = region3Phase(out.temperature, dense);
+        out.phase = region3Phase(out.temperature, pressure, dense);
     }
 
-    private static Phase region3Phase(double temperature, boolean dense) {
+    private static Phase region3Phase(double temperature, double pressure, boolean dense) {
         if (temperature >= If97Saturation.CRITICAL_TEMPERATURE_K) {
-            return Phase.SUPERCRITICAL;
+            return pressure >= If97Saturation.CRITICAL_PRESSURE_PA ? Phase.SUPERCRITICAL : Phase.VAPOUR;
         }
         return dense ? Phase.LIQUID : Phase.VAPOUR;
     }
@@ -315,7 +315,7 @@ final class If97Model implements FluidModel {
         if (!region3.atPressureEntropy(pressure, entropy, density, temperature, Phase.LIQUID, w, out)) {
             throw If97Failure.of("region 3", "p = " + pressure + " Pa, s = " + entropy + " J/(kg K)", 60);
         }
-        out.phase = region3Phase(out.temperature, dense);
+        out.phase = region3Phase(out.temperature, pressure, dense);
     }
 
     private void requireEntropy(double pressure, double entropy, boolean inRange, Workspace w) {
