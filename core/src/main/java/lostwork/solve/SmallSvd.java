@@ -272,7 +272,7 @@ public final class SmallSvd {
     }
 
     /** Unit length, and the largest entry positive, so that the same matrix gives the same words. */
-    private static void normalise(double[] data, int from, int length) {
+    static void normalise(double[] data, int from, int length) {
         final double norm = norm(data, from, length);
         int largest = from;
         for (int k = from; k < from + length; k++) {

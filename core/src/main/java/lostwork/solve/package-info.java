@@ -7,6 +7,7 @@
  *       its slope, from a hint if there is one;
  *   <li>{@link lostwork.solve.DenseLu}: a square system of 1 to a few hundred equations, its transpose, and an estimate
  *       of how near to singular it is;
+ *   <li>{@link lostwork.solve.DifferentiableFunction}: a function of several numbers with its gradient;
  *   <li>{@link lostwork.solve.SmallSvd}: singular values, rank at a stated tolerance, and the null vectors of both sides.
  * </ul>
  *
@@ -16,15 +17,14 @@
  * guess. The same input gives the same bits: nothing here is random and nothing depends on threads or time.
  *
  * <h2>Memory, nulls and threads</h2>
- * <p>{@code BracketedRoot} is immutable and thread-safe. {@code DenseLu} and {@code SmallSvd} own their storage, which is
- * reused by the next factorisation: one instance belongs to one thread. Methods documented as allocation-free create no
+ * <p>{@code BracketedRoot} and {@code SmallSvd} are immutable and thread-safe. {@code DenseLu} owns its storage, which is reused
+ * by the next factorisation: one instance belongs to one thread. Methods documented as allocation-free create no
  * objects. Matrices are row-major arrays. No parameter and no result is null.
  *
  * <h2>Sources</h2>
  * <ul>
  *   <li>T. R. Chandrupatla, A new hybrid quadratic/bisection algorithm for finding the zero of a nonlinear function
  *       without using derivatives, Advances in Engineering Software 28 (1997) 145-149;
- *   <li>R. P. Brent, Algorithms for Minimization without Derivatives, Prentice-Hall 1973;
  *   <li>G. E. Alefeld, F. A. Potra, Y. Shi, Algorithm 748: enclosing zeros of continuous functions, ACM Transactions on
  *       Mathematical Software 21 (1995) 327-344;
  *   <li>N. J. Higham, Accuracy and Stability of Numerical Algorithms, 2nd ed., SIAM 2002, chapters 9 and 15;

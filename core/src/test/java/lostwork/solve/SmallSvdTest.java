@@ -4,7 +4,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.Set;
 import java.util.SplittableRandom;
+import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
 
 class SmallSvdTest {
@@ -115,6 +117,66 @@ class SmallSvdTest {
             }
             assertEquals(w == v ? 1 : 0, dot, 1e-13, where);
         }
+    }
+
+    /** Three rings of balances in one matrix, their equations shuffled: each separated vector names one ring only. */
+    @Test
+    void separatedVectorsNameOneGroupEach() {
+        final SplittableRandom random = new SplittableRandom(32);
+        final int[] size = {3, 5, 9};
+        final int n = 17;
+        for (int trial = 0; trial < 50; trial++) {
+            final int[] row = random.ints(0, 1000).distinct().limit(n).toArray();
+            final int[] place = new int[n];
+            for (int i = 0; i < n; i++) {
+                for (final int other : row) {
+                    place[i] += other < row[i] ? 1 : 0;
+                }
+            }
+            final double[] a = new double[n * n];
+            final double[] factor = random.doubles(n, 0.5, 2).toArray();
+            int first = 0;
+            for (final int ring : size) {
+                for (int i = 0; i < ring; i++) {
+                    final int equation = place[first + i];
+                    a[equation * n + first + i] = factor[first + i];
+                    a[equation * n + first + (i + 1) % ring] -= factor[first + i];
+                }
+                first += ring;
+            }
+            final RankReport plain = SmallSvd.of(a, n, n).rankReport(1e-10);
+            final RankReport report = plain.separated();
+            assertEquals(3, report.leftNullDimension());
+            final Set<Integer> found = new TreeSet<>();
+            for (int v = 0; v < 3; v++) {
+                final double[] y = report.leftNullVector(v);
+                int used = 0;
+                for (int i = 0; i < n; i++) {
+                    used += y[i] != 0 ? 1 : 0;
+                }
+                found.add(used);
+                for (int j = 0; j < n; j++) {
+                    double sum = 0;
+                    for (int i = 0; i < n; i++) {
+                        sum += a[i * n + j] * y[i];
+                    }
+                    assertEquals(0, sum, 1e-13);
+                }
+                assertEquals(1, SmallSvd.norm(y, 0, n), 1e-14);
+            }
+            assertEquals(Set.of(3, 5, 9), found);
+            int mixed = 0;
+            for (int v = 0; v < 3; v++) {
+                final double[] x = report.rightNullVector(v);
+                for (int j = 0; j < n; j++) {
+                    mixed += x[j] != 0 ? 1 : 0;
+                }
+            }
+            assertEquals(n, mixed); // each unknown belongs to one vector
+        }
+        final RankReport regular =
+                SmallSvd.of(new double[] {1, 0, 0, 1}, 2, 2).rankReport(1e-10).separated();
+        assertEquals(0, regular.leftNullDimension());
     }
 
     /** Rows scaled over many decades: the small singular values keep their digits (graded matrix). */
