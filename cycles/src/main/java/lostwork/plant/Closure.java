@@ -110,6 +110,14 @@ public final class Closure {
                         + EntropyRate.wattsPerKelvin(balance.generation()) + ")");
             }
         }
+        for (Component component : solution.plant().components()) {
+            component.variables().forEach(variable -> checkLimits(solution, variable, findings));
+            for (Port port : component.ports()) {
+                if (port instanceof MaterialPort material) {
+                    checkLimits(solution, material.flow(), findings);
+                }
+            }
+        }
         for (Equations.Requirement requirement : solution.plant().requirements()) {
             final double value = solution.evaluate(requirement.notNegative());
             if (value < -1e-7) {
@@ -118,6 +126,18 @@ public final class Closure {
             }
         }
         return findings;
+    }
+
+    private static void checkLimits(Solution solution, Variable<?> variable, List<String> findings) {
+        final int slot = solution.plant().slotOf(variable);
+        if (!solution.plan().isActive(slot)) {
+            return; // a defined variable that nothing asked for
+        }
+        final double value = solution.si(slot);
+        final double room = ROUNDING * Math.max(1, Math.abs(value));
+        if (value < variable.lowest() - room || value > variable.highest() + room) {
+            findings.add(variable + " would have to be " + solution.value(variable));
+        }
     }
 
     private static boolean heatOfUnknownTemperature(Solution solution, Component component) {

@@ -3,6 +3,7 @@ package lostwork.plant;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import lostwork.quantity.LinearQuantity;
 import lostwork.quantity.QuantityKind;
 import lostwork.quantity.ScalarQuantity;
 
@@ -87,6 +88,24 @@ public abstract class Component {
     protected final <Q extends ScalarQuantity<Q, ?>> Variable<Q> variable(
             String variableName, QuantityKind<Q, ?> kind) {
         final Variable<Q> variable = new Variable<>(name, variableName, kind);
+        variables.add(variable);
+        return variable;
+    }
+
+    /**
+     * {@return a new variable of this component whose values lie between two limits}
+     *
+     * <p>A given value outside the limits is refused at once; a computed one is an error of the design that names the
+     * variable.
+     *
+     * @param <Q> the quantity of its values
+     * @param variableName its name, unique within the component
+     * @param lowest the lowest value that a possible machine has
+     * @param highest the highest value that a possible machine has
+     */
+    protected final <Q extends ScalarQuantity<Q, D>, D extends LinearQuantity<D>> Variable<Q> variable(
+            String variableName, Q lowest, Q highest) {
+        final Variable<Q> variable = new Variable<>(name, variableName, lowest.kind(), lowest.si(), highest.si());
         variables.add(variable);
         return variable;
     }

@@ -31,13 +31,13 @@ public abstract class MaterialPort extends Port {
         super(component, name);
         pressure = new Variable<>(component, name + " pressure", Pressure.KIND);
         enthalpy = new Variable<>(component, name + " enthalpy", SpecificEnergy.KIND);
-        flow = new Variable<>(component, name + " flow", MassFlow.KIND);
+        flow = new Variable<>(component, name + " flow", MassFlow.KIND, 0, Double.MAX_VALUE);
         temperature = new Variable<>(component, name + " temperature", Temperature.KIND);
         entropy = new Variable<>(component, name + " entropy", SpecificEntropy.KIND);
         volume = new Variable<>(component, name + " specific volume", SpecificVolume.KIND);
-        vapourFraction = new Variable<>(component, name + " vapour fraction", Ratio.KIND);
-        superheat = new Variable<>(component, name + " superheat", TemperatureSpan.KIND);
-        subcooling = new Variable<>(component, name + " subcooling", TemperatureSpan.KIND);
+        vapourFraction = new Variable<>(component, name + " vapour fraction", Ratio.KIND, 0, 1);
+        superheat = new Variable<>(component, name + " superheat", TemperatureSpan.KIND, 0, Double.MAX_VALUE);
+        subcooling = new Variable<>(component, name + " subcooling", TemperatureSpan.KIND, 0, Double.MAX_VALUE);
     }
 
     /** {@return the absolute pressure} */

@@ -106,6 +106,10 @@ final class NeighbourStarts implements StartValues {
         return layout.scales.get(slot).clamp(value);
     }
 
+    private double valueOrStart(int slot, SlotRole role, boolean[] settled, Workspace w) {
+        return settled[slot] ? w.get(slot) : core(slot, role, settled, w);
+    }
+
     private double pressure(int index, boolean[] settled, Workspace w) {
         final Layout.StreamState state = layout.states.get(index);
         final SaturationModel saturation = state.model().saturation();
@@ -154,7 +158,8 @@ final class NeighbourStarts implements StartValues {
     private double enthalpy(int index, boolean[] settled, Workspace w) {
         final Layout.StreamState state = layout.states.get(index);
         final FluidModel model = state.model();
-        final double p = w.get(state.slot(SlotRole.PRESSURE));
+        // The pressure may belong to a later block, when the equations here do not depend on it.
+        final double p = valueOrStart(state.slot(SlotRole.PRESSURE), SlotRole.PRESSURE, settled, w);
         final StatePoint point = new StatePoint();
         final int t = state.slot(SlotRole.TEMPERATURE);
         if (settled[t]) {
@@ -214,7 +219,7 @@ final class NeighbourStarts implements StartValues {
     private double other(int slot, boolean[] settled, Workspace w) {
         final Layout.Slot it = layout.slots.get(slot);
         if (it.state() >= 0) {
-            return stateProperty(it, w);
+            return stateProperty(it, settled, w);
         }
         if (it.kind() == Temperature.KIND) {
             return FALLBACK_TEMPERATURE_K;
@@ -228,13 +233,13 @@ final class NeighbourStarts implements StartValues {
         return it.kind() == Power.KIND ? 0 : layout.scales.get(slot).natural();
     }
 
-    private double stateProperty(Layout.Slot slot, Workspace w) {
+    private double stateProperty(Layout.Slot slot, boolean[] settled, Workspace w) {
         final Layout.StreamState state = layout.states.get(slot.state());
         final StatePoint point = new StatePoint();
+        final double p = valueOrStart(state.slot(SlotRole.PRESSURE), SlotRole.PRESSURE, settled, w);
+        final double h = valueOrStart(state.slot(SlotRole.ENTHALPY), SlotRole.ENTHALPY, settled, w);
         try {
-            state.model()
-                    .atPressureEnthalpy(
-                            w.get(state.slot(SlotRole.PRESSURE)), w.get(state.slot(SlotRole.ENTHALPY)), point);
+            state.model().atPressureEnthalpy(p, h, point);
         } catch (OutOfRangeException e) {
             return slot.role() == SlotRole.TEMPERATURE ? FALLBACK_TEMPERATURE_K : 0;
         }

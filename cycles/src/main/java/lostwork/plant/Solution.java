@@ -3,6 +3,7 @@ package lostwork.plant;
 import java.util.ArrayList;
 import java.util.List;
 import lostwork.fluid.FluidState;
+import lostwork.fluid.Phase;
 import lostwork.fluid.SaturationModel;
 import lostwork.fluid.StatePoint;
 import lostwork.plant.kernel.Tape;
@@ -178,8 +179,12 @@ public final class Solution {
                 && p < saturation.criticalPressure()
                 && p >= saturation.pressure(saturation.lowestTemperature())) {
             final double boiling = saturation.temperature(p);
-            fill(all, state.slot(SlotRole.SUPERHEAT), point.temperature - boiling);
-            fill(all, state.slot(SlotRole.SUBCOOLING), boiling - point.temperature);
+            final boolean wet = point.phase == Phase.TWO_PHASE;
+            if (!wet && point.temperature >= boiling) {
+                fill(all, state.slot(SlotRole.SUPERHEAT), point.temperature - boiling);
+            } else if (!wet) {
+                fill(all, state.slot(SlotRole.SUBCOOLING), boiling - point.temperature);
+            }
         }
     }
 

@@ -6,11 +6,11 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.IntStream;
-import lostwork.fluid.SaturationModel;
 import lostwork.plant.kernel.BlockFailure;
 import lostwork.plant.kernel.BlockSolver;
 import lostwork.plant.kernel.EquationSystem;
 import lostwork.plant.kernel.Limits;
+import lostwork.plant.kernel.Tape;
 import lostwork.plant.kernel.Workspace;
 
 /**
@@ -19,6 +19,8 @@ import lostwork.plant.kernel.Workspace;
  * same time. Immutable and thread-safe.
  */
 public final class SolvePlan {
+    private static final int MORE_SEARCHES = 4;
+
     private final Plant plant;
     private final List<Variable<?>> givenVariables;
     private final boolean[] given;
@@ -98,21 +100,61 @@ public final class SolvePlan {
     }
 
     Solution solve(Specification specification, SolveOptions options) {
+        final long deadline = System.nanoTime() + options.limit().toNanos();
+        Solution found = solveOnce(specification, options, deadline, 0);
+        if (options.secondLaw() == SolveOptions.SecondLaw.REPORTED) {
+            return found;
+        }
+        final List<String> findings = found.violations();
+        // A loop may have several solutions, of which only one is possible: look for it before giving up.
+        for (int search = 1; !found.violations().isEmpty(); search++) {
+            if (search > searches()) {
+                throw new PlantSolveException(
+                        PlantSolveException.Reason.IMPOSSIBLE,
+                        "plant \"" + plant.name() + "\": no real machine can do this: " + String.join("; ", findings)
+                                + ". Change a given value, or solve with SecondLaw.REPORTED to look at the numbers",
+                        List.of(),
+                        List.of());
+            }
+            try {
+                found = solveOnce(specification, options, deadline, search);
+            } catch (PlantSolveException e) {
+                if (e.reason() == PlantSolveException.Reason.CANCELLED
+                        || e.reason() == PlantSolveException.Reason.OUT_OF_TIME) {
+                    throw e;
+                }
+            }
+        }
+        return found;
+    }
+
+    /** How often other solutions are looked for: only equations that are not affine can have them. */
+    private int searches() {
+        return system.blocks().stream().anyMatch(this::mayHaveSeveralSolutions) ? MORE_SEARCHES : 0;
+    }
+
+    private boolean mayHaveSeveralSolutions(int[] block) {
+        final Tape tape = system.equations().get(block[0]);
+        return block.length > 1 || !tape.isAffineIn(tape.placeOf(system.matched()[block[0]]));
+    }
+
+    private Solution solveOnce(Specification specification, SolveOptions options, long deadline, int search) {
         final Workspace w = system.workspace(List.of());
         for (Variable<?> variable : givenVariables) {
             w.set(plant.slotOf(variable), specification.si(variable));
         }
         final int blocks = Math.max(1, system.blocks().size());
         final Limits limits = new Limits(
-                System.nanoTime() + options.limit().toNanos(),
+                deadline,
                 options.cancelled(),
                 done -> options.progress().done((double) done / blocks),
                 options.seed(),
-                options.restarts());
+                options.restarts(),
+                search);
         final BlockSolver solver = new BlockSolver(system, w, given, starts, limits);
         final Solution start = options.start();
         try {
-            if (start == null) {
+            if (start == null || search > 0) {
                 solver.solveCold();
             } else {
                 warm(start, w);
@@ -130,20 +172,7 @@ public final class SolvePlan {
         if (solver.anyOutsideRange()) {
             throw outsideRange(w);
         }
-        requireSettledPhases(w);
-        final Solution solution = new Solution(this, specification, w.copyOfValues(), largest);
-        if (options.secondLaw() == SolveOptions.SecondLaw.ENFORCED) {
-            final List<String> findings = solution.violations();
-            if (!findings.isEmpty()) {
-                throw new PlantSolveException(
-                        PlantSolveException.Reason.IMPOSSIBLE,
-                        "plant \"" + plant.name() + "\": no real machine can do this: " + String.join("; ", findings)
-                                + ". Change a given value, or solve with SecondLaw.REPORTED to look at the numbers",
-                        List.of(),
-                        List.of());
-            }
-        }
-        return solution;
+        return new Solution(this, specification, w.copyOfValues(), largest);
     }
 
     private void warm(Solution start, Workspace w) {
@@ -155,41 +184,6 @@ public final class SolvePlan {
                 w.set(slot, start.si(slot));
             }
         }
-    }
-
-    /** A temperature given at exactly the saturation pressure settles no state. */
-    private void requireSettledPhases(Workspace w) {
-        for (Layout.StreamState state : plant.layout().states) {
-            final int t = state.slot(SlotRole.TEMPERATURE);
-            final SaturationModel saturation = state.model().saturation();
-            if (saturation == null
-                    || !given[t]
-                    || given[state.slot(SlotRole.VAPOUR_FRACTION)]
-                    || !solvedDirectly(state)) {
-                continue;
-            }
-            final double temperature = w.get(t);
-            if (temperature < saturation.criticalTemperature()
-                    && Math.abs(w.get(state.slot(SlotRole.PRESSURE)) / saturation.pressure(temperature) - 1) < 1e-7) {
-                throw new PlantSolveException(
-                        PlantSolveException.Reason.UNDETERMINED,
-                        "plant \"" + plant.name() + "\": " + state.port().temperature()
-                                + " is the saturation temperature at the pressure there, so it does not tell liquid from"
-                                + " vapour; give " + state.port().vapourFraction() + " instead",
-                        List.of(),
-                        List.of(state.port().enthalpy()));
-            }
-        }
-    }
-
-    private boolean solvedDirectly(Layout.StreamState state) {
-        for (int e = 0; e < entries.size(); e++) {
-            if (system.matched()[e] == state.slot(SlotRole.ENTHALPY)
-                    && system.equations().get(e) == entries.get(e).direct()) {
-                return true;
-            }
-        }
-        return false;
     }
 
     private PlantSolveException outsideRange(Workspace w) {

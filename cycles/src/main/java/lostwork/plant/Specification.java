@@ -5,7 +5,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.NoSuchElementException;
 import java.util.Optional;
+import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.ScalarQuantity;
+import lostwork.quantity.Unit;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -41,6 +43,7 @@ public final class Specification {
      */
     public <Q extends ScalarQuantity<Q, ?>> Specification given(Variable<Q> variable, Q value) {
         plant.slotOf(variable);
+        requirePossible(variable, value);
         if (given.containsKey(variable)) {
             throw new IllegalArgumentException(
                     variable + " is given already, as " + given.get(variable) + "; use with(...) to change its value");
@@ -60,6 +63,7 @@ public final class Specification {
      */
     public <Q extends ScalarQuantity<Q, ?>> Specification with(Variable<Q> variable, Q value) {
         requireGiven(variable);
+        requirePossible(variable, value);
         final Map<Variable<?>, ScalarQuantity<?, ?>> changed = new LinkedHashMap<>(given);
         changed.put(variable, value);
         return new Specification(plant, changed, plan);
@@ -76,6 +80,23 @@ public final class Specification {
         final Map<Variable<?>, ScalarQuantity<?, ?>> fewer = new LinkedHashMap<>(given);
         fewer.remove(variable);
         return new Specification(plant, fewer, null);
+    }
+
+    private static void requirePossible(Variable<?> variable, ScalarQuantity<?, ?> value) {
+        if (!(value.si() >= variable.lowest() && value.si() <= variable.highest())) {
+            throw new OutOfRangeException(
+                    variable.toString(),
+                    value.si(),
+                    variable.lowest(),
+                    variable.highest(),
+                    variable.kind().units().stream()
+                            .filter(unit -> unit.factor() == 1 && unit.offset() == 0)
+                            .map(Unit::symbol)
+                            .findFirst()
+                            .orElse(""),
+                    "what a possible machine can have",
+                    "");
+        }
     }
 
     private void requireGiven(Variable<?> variable) {

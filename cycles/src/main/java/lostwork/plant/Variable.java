@@ -18,19 +18,22 @@ public final class Variable<Q extends ScalarQuantity<Q, ?>> extends Expression {
     private final String component;
     private final String name;
     private final QuantityKind<Q, ?> kind;
+    private final double lowest;
+    private final double highest;
 
-    /**
-     * Creates a variable.
-     *
-     * @param component the name of its component
-     * @param name its own name within the component
-     * @param kind the kind of its values
-     */
+    /** Creates a variable whose values are bounded by their kind alone. */
     Variable(String component, String name, QuantityKind<Q, ?> kind) {
+        this(component, name, kind, kind.lowest(), Double.MAX_VALUE);
+    }
+
+    /** Creates a variable with the values, in coherent SI units, that a possible machine keeps between. */
+    Variable(String component, String name, QuantityKind<Q, ?> kind, double lowest, double highest) {
         super(kind.dimension());
         this.component = component;
         this.name = name;
         this.kind = kind;
+        this.lowest = lowest;
+        this.highest = highest;
     }
 
     /** {@return the name of its component} */
@@ -46,6 +49,16 @@ public final class Variable<Q extends ScalarQuantity<Q, ?>> extends Expression {
     /** {@return the kind of its values} */
     public QuantityKind<Q, ?> kind() {
         return kind;
+    }
+
+    /** {@return the lowest value that a possible machine has, in the coherent SI unit} */
+    public double lowest() {
+        return lowest;
+    }
+
+    /** {@return the highest value that a possible machine has, in the coherent SI unit} */
+    public double highest() {
+        return highest;
     }
 
     @Override

@@ -132,7 +132,7 @@ public final class BlockSolver {
             final double residual = tape.evaluate(w);
             final double slope = w.gradient[place];
             w.x[slot] -= residual / slope;
-            if (!(Math.abs(slope) * scale(slot) > SINGULAR * rowScale(tape))) {
+            if (!(Math.abs(slope) * scale(slot) > SINGULAR * rowScale(tape)) || tape.isAmbiguous(w)) {
                 throw singular(number, block, new double[] {1}, new double[] {1});
             }
             return;
@@ -141,7 +141,8 @@ public final class BlockSolver {
             starts.prepare(new int[] {slot}, known, w);
         }
         final double start = w.x[slot];
-        if (!newton(tape, place, slot) && !scan(tape, place, slot, start)) {
+        // A later search takes another root, where there is one.
+        if ((limits.search() > 0 || !newton(tape, place, slot)) && !scan(tape, place, slot, start)) {
             throw failure(BlockFailure.Reason.NOT_MET, number, block);
         }
         tape.evaluate(w);
@@ -244,13 +245,20 @@ public final class BlockSolver {
         final Integer[] order = new Integer[SCAN_POINTS - 1];
         Arrays.setAll(order, i -> i);
         Arrays.sort(order, (a, b) -> Double.compare(Math.abs(at[a] - start), Math.abs(at[b] - start)));
+        final int wanted = limits.search();
+        int roots = 0;
+        double first = Double.NaN;
         for (int i : order) {
             if (r[i] * r[i + 1] <= 0 && bisect(tape, place, slot, at[i], at[i + 1], r[i])) {
-                return true;
+                if (roots == wanted) {
+                    return true;
+                }
+                first = roots == 0 ? w.x[slot] : first;
+                roots++;
             }
         }
-        w.x[slot] = start;
-        return false;
+        w.x[slot] = roots > 0 ? first : start;
+        return roots > 0;
     }
 
     private static double pointBetween(SlotScale bounds, double share) {
@@ -310,18 +318,21 @@ public final class BlockSolver {
         for (int j = 0; j < n; j++) {
             first[j] = system.scales().get(slots[j]).clamp(w.x[slots[j]]);
         }
-        final SplittableRandom random = new SplittableRandom(limits.seed() * 31 + number);
+        final SplittableRandom random = new SplittableRandom((limits.seed() * 31 + number) * 31 + limits.search());
         double[] bestStart = first;
         double bestResidual = Double.POSITIVE_INFINITY;
         for (int attempt = 0; attempt <= limits.restarts(); attempt++) {
             for (int j = 0; j < n; j++) {
-                w.x[slots[j]] = attempt == 0 ? first[j] : perturbed(slots[j], first[j], random, attempt);
+                w.x[slots[j]] = attempt == 0 && limits.search() == 0
+                        ? first[j]
+                        : perturbed(slots[j], first[j], random, attempt + limits.search());
             }
             if (attempt % 2 == 0) {
                 sweep(block, slots);
                 sweep(block, slots);
             }
-            if (iterate(number, block, slots)) {
+            final boolean met = iterate(number, block, slots);
+            if (met && (!isOutside(block) || attempt == limits.restarts())) {
                 finishLoop(number, block, slots);
                 return;
             }
@@ -338,6 +349,17 @@ public final class BlockSolver {
             w.x[slots[j]] = bestStart[j];
         }
         throw failure(BlockFailure.Reason.NOT_MET, number, block);
+    }
+
+    private boolean isOutside(int[] block) {
+        for (int equation : block) {
+            final Tape tape = system.equations().get(equation);
+            tape.forward(w);
+            if (tape.isOutside(w)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private double perturbed(int slot, double value, SplittableRandom random, int attempt) {

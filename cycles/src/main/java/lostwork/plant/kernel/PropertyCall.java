@@ -17,6 +17,9 @@ import org.jspecify.annotations.Nullable;
  * not thread-safe.
  */
 final class PropertyCall {
+    /** Relative distance from the saturation pressure within which a state counts as saturated. */
+    private static final double SATURATED = 1e-8;
+
     private final FluidModel model;
     private final PropertyKind kind;
     private final @Nullable SharedState shared;
@@ -30,6 +33,7 @@ final class PropertyCall {
     private double byFirst;
     private double bySecond;
     private boolean outside;
+    private boolean ambiguous;
 
     /**
      * Creates a call site.
@@ -66,12 +70,21 @@ final class PropertyCall {
         return outside;
     }
 
+    /**
+     * {@return whether the last evaluation asked for the state at a temperature and its own saturation pressure, a pair
+     * that does not tell liquid from vapour}
+     */
+    boolean ambiguous() {
+        return ambiguous;
+    }
+
     /** Evaluates the function; repeated arguments cost nothing. */
     void evaluate(double first, double second) {
         if (first == lastFirst && (second == lastSecond || kind.arguments() == 1)) {
             return;
         }
         outside = false;
+        ambiguous = false;
         lastFirst = Double.NaN; // an exception below must not leave a stale hit
         try {
             compute(first, second);
@@ -110,6 +123,7 @@ final class PropertyCall {
             case ENTHALPY_PT -> {
                 model.atTemperaturePressure(second, p, point);
                 set(point.enthalpy, point.volume - second * point.volumeByTemperature, point.heatCapacity);
+                ambiguous = isSaturated(second, p);
             }
             case ENTROPY_PT -> {
                 model.atTemperaturePressure(second, p, point);
@@ -142,6 +156,14 @@ final class PropertyCall {
         } else {
             shared.at(pressure, enthalpy);
         }
+    }
+
+    private boolean isSaturated(double temperature, double pressure) {
+        final SaturationModel saturation = model.saturation();
+        return saturation != null
+                && temperature > saturation.lowestTemperature()
+                && temperature < saturation.criticalTemperature()
+                && Math.abs(pressure / saturation.pressure(temperature) - 1) < SATURATED;
     }
 
     private void set(double value, double byFirst, double bySecond) {

@@ -216,9 +216,24 @@ public final class Tape {
         return value[left] - value[right];
     }
 
-    /** {@return the larger side of the equation, without its sign, after an evaluation} */
-    double magnitude(Workspace w) {
-        return Math.max(Math.abs(w.value[left]), Math.abs(w.value[right]));
+    /** {@return whether a property function of the equation lay outside the range of its fluid in its last evaluation} */
+    boolean isOutside(Workspace w) {
+        for (int i = 0; i < ops.length; i++) {
+            if (ops[i] == Op.PROPERTY && w.property(sites[i]).outside()) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    /** {@return whether a property function of the equation could not tell liquid from vapour in its last evaluation} */
+    boolean isAmbiguous(Workspace w) {
+        for (int i = 0; i < ops.length; i++) {
+            if (ops[i] == Op.PROPERTY && w.property(sites[i]).ambiguous()) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** {@return the left side after an evaluation} */
