@@ -19,7 +19,7 @@ public abstract class LinearQuantity<Q extends LinearQuantity<Q>> extends Scalar
      * @throws OutOfRangeException if the value is NaN, infinite or outside the bounds of the kind
      */
     protected LinearQuantity(double si, QuantityKind<Q, Q> kind) {
-        super(si, kind);
+        super(kind.requireFinite(si));
     }
 
     /**

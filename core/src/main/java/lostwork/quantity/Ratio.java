@@ -70,9 +70,9 @@ public final class Ratio extends LinearQuantity<Ratio> {
     }
 
     /**
-     * {@return the ratio that a text states, such as {@code "12.5 1"}}
+     * {@return the ratio that a text states, such as {@code "0.88"} or {@code "88 %"}}
      *
-     * @param text a number with a decimal point, then a unit; see {@link QuantityKind#parse}
+     * @param text a number with a decimal point, then perhaps a unit; see {@link QuantityKind#parse}
      * @throws UnreadableQuantityException if the text is not read; the message lists what is accepted
      * @throws OutOfRangeException if the value is not allowed
      */

@@ -36,6 +36,11 @@ public abstract class ScalarQuantity<Q extends ScalarQuantity<Q, D>, D extends L
         this.si = kind.requireValid(si);
     }
 
+    /** Stores a value that is already checked. */
+    ScalarQuantity(double checkedSi) {
+        this.si = checkedSi;
+    }
+
     /**
      * Checks and stores a value that is given in a unit; a refusal is worded in that unit.
      *
@@ -110,19 +115,17 @@ public abstract class ScalarQuantity<Q extends ScalarQuantity<Q, D>, D extends L
     @Override
     public final int compareTo(Q other) {
         final ScalarQuantity<Q, D> that = other;
-        return Double.compare(si, that.si);
+        return Double.compare(si + 0.0, that.si + 0.0); // + 0.0 makes -0.0 and 0.0 one number
     }
 
     @Override
     public final boolean equals(Object other) {
-        return other != null
-                && other.getClass() == getClass()
-                && Double.compare(si, ((ScalarQuantity<?, ?>) other).si) == 0;
+        return other != null && other.getClass() == getClass() && si == ((ScalarQuantity<?, ?>) other).si;
     }
 
     @Override
     public final int hashCode() {
-        return Double.hashCode(si);
+        return Double.hashCode(si + 0.0);
     }
 
     /** {@return the value in the display unit of its kind, up to seven significant digits, such as {@code 540 °C}} */

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.lang.reflect.Method;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
 
@@ -46,26 +47,41 @@ class ArithmeticTest {
         assertTrue(methods > 200, "methods found: " + methods);
     }
 
-    @Test
-    void everyProductCanBeWrittenEitherWay() {
-        final Map<String, Class<?>> products = new HashMap<>();
+    /** {@return the result class of every product or quotient of two kinds, by the classes of the two} */
+    private static Map<List<Class<?>>, Class<?>> results(String name) {
+        final Map<List<Class<?>>, Class<?>> results = new HashMap<>();
         for (Class<?> type : AllKinds.classes()) {
             for (Method method : type.getDeclaredMethods()) {
-                if (method.getName().equals("times")
+                if (method.getName().equals(name)
                         && method.getParameterCount() == 1
                         && isQuantity(method.getParameterTypes()[0])
                         && method.getParameterTypes()[0] != Ratio.class) {
-                    products.put(
-                            type.getSimpleName() + " × " + method.getParameterTypes()[0].getSimpleName(),
-                            method.getReturnType());
+                    results.put(List.of(type, method.getParameterTypes()[0]), method.getReturnType());
                 }
             }
         }
-        assertTrue(products.size() > 100);
-        products.forEach((product, result) -> {
-            final String[] factors = product.split(" × ");
-            assertEquals(result, products.get(factors[1] + " × " + factors[0]), product);
+        return results;
+    }
+
+    @Test
+    void everyProductCanBeWrittenEitherWay() {
+        final Map<List<Class<?>>, Class<?>> products = results("times");
+        assertTrue(products.size() > 100, "products found: " + products.size());
+        products.forEach((factors, result) ->
+                assertEquals(result, products.get(List.of(factors.get(1), factors.get(0))), factors.toString()));
+    }
+
+    @Test
+    void everyProductHasItsQuotients() {
+        final Map<List<Class<?>>, Class<?>> quotients = results("over");
+        results("times").forEach((factors, result) -> {
+            final boolean ofPoints = factors.contains(Temperature.class) || factors.contains(Pressure.class);
+            final boolean ambiguous = factors.equals(List.of(TemperatureSpan.class, HeatCapacityRate.class));
+            if (!ofPoints && !ambiguous) {
+                assertEquals(factors.get(1), quotients.get(List.of(result, factors.get(0))), factors + " = " + result);
+            }
         });
+        assertEquals(Conductance.class, quotients.get(List.of(Power.class, TemperatureSpan.class)));
     }
 
     @Test
