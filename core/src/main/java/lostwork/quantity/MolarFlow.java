@@ -19,7 +19,7 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
                     MolarFlow::new,
                     10,
                     List.of(Units.MOLE_PER_SECOND, Units.KILOMOLE_PER_HOUR))
-            .withHints(NormalCondition.hints());
+            .withHints(NormalVolumeUnit.hints());
 
     private MolarFlow(double si) {
         super(si, KIND);
@@ -75,15 +75,15 @@ public final class MolarFlow extends LinearQuantity<MolarFlow> {
      * {@return the molar flow that a text states, in moles such as {@code "3 kmol/h"} or as the volume flow of an ideal
      * gas at a normal condition such as {@code "12000 Nm³/h"}}
      *
-     * @param text a number with a decimal point, then a unit; {@code N} marks a volume counted at {@link
-     *     NormalCondition#DIN_1343}, {@code S} one counted at {@link NormalCondition#ISO_13443}
-     * @param condition the condition that a volume is counted at, which the mark in the text must agree with
+     * @param text a number with a decimal point, then a unit; a volume is marked with {@code N} or {@code S}
+     * @param condition the condition that a volume is counted at; {@code N} is refused for
+     *     {@link NormalCondition#ISO_13443} and {@code S} for {@link NormalCondition#DIN_1343}
      * @throws UnreadableQuantityException if the text is not read, or its mark contradicts the condition
      * @throws OutOfRangeException if the value is not allowed
      */
     public static MolarFlow parse(String text, NormalCondition condition) {
         final QuantityText.Split split = QuantityText.split(text, KIND);
-        final Unit<VolumeFlow> unit = condition.unit(text, split.unit());
+        final Unit<VolumeFlow> unit = NormalVolumeUnit.find(text, split.unit(), condition);
         return unit == null
                 ? KIND.parse(text)
                 : new MolarFlow(

@@ -280,8 +280,9 @@ public final class QuantityKind<Q extends ScalarQuantity<Q, D>, D extends Linear
      * no kind here counts angles.
      *
      * @param quantity the quantity
-     * @throws IllegalArgumentException if the dimension is another one, a point is given for a difference or the reverse,
-     *     or the kind counts money, for which JSR-385 has no unit
+     * @throws IllegalArgumentException if the dimension is another one, or a point is given for a difference or the
+     *     reverse
+     * @throws UnsupportedOperationException if the kind counts money, for which JSR-385 has no unit
      * @throws OutOfRangeException if the value is not allowed
      */
     public Q of(Quantity<?> quantity) {

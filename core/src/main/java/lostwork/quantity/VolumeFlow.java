@@ -25,7 +25,7 @@ public final class VolumeFlow extends LinearQuantity<VolumeFlow> {
                             Units.LITRE_PER_MINUTE,
                             Units.CUBIC_FOOT_PER_MINUTE,
                             Units.US_GALLON_PER_MINUTE))
-            .withHints(NormalCondition.hints());
+            .withHints(NormalVolumeUnit.hints());
 
     private VolumeFlow(double si) {
         super(si, KIND);

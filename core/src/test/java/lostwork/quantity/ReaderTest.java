@@ -164,6 +164,13 @@ class ReaderTest {
         assertEquals(12000 / 3.6 / 22.41396954, flow.si(), 1e-7);
         assertEquals(12000, flow.inNormalCubicMetresPerHour(NormalCondition.DIN_1343), 1e-9);
         assertEquals(MolarFlow.kilomolesPerHour(3), MolarFlow.parse("3 kmol/h", NormalCondition.DIN_1343));
+        final NormalCondition air = NormalCondition.of("contract", Temperature.celsius(20), Pressure.bar(1));
+        // R T/p = 8.314462618 × 293.15 / 100 000 = 0.024 373 85 m³/mol, worked by hand.
+        assertEquals(0.02437385, air.molarVolume().si(), 5e-9);
+        assertEquals(12000, MolarFlow.parse("12000 Nm³/h", air).inNormalCubicMetresPerHour(air), 1e-9);
+        assertEquals("DIN 1343 (0 °C, 1.01325 bar)", NormalCondition.DIN_1343.toString());
+        assertThrows(
+                OutOfRangeException.class, () -> NormalCondition.of("none", Temperature.celsius(0), Pressure.bar(0)));
         assertThrows(UnreadableQuantityException.class, () -> MolarFlow.parse("12000 Sm³/h", NormalCondition.DIN_1343));
     }
 
