@@ -10,7 +10,9 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import lostwork.quantity.OutOfRangeException;
+import java.util.function.LongSupplier;
+import lostwork.fluid.FlashException;
+import lostwork.solve.SolveException;
 
 /** The audit from the arguments to the files, without the process around it. */
 final class AuditProgram {
@@ -23,16 +25,19 @@ final class AuditProgram {
 
     private final PrintStream out;
     private final PrintStream err;
+    private final LongSupplier clock;
 
     /**
      * Creates the program.
      *
      * @param out where the report goes
      * @param err where problems and progress go
+     * @param clock time in nanoseconds, for the progress
      */
-    AuditProgram(PrintStream out, PrintStream err) {
+    AuditProgram(PrintStream out, PrintStream err, LongSupplier clock) {
         this.out = out;
         this.err = err;
+        this.clock = clock;
     }
 
     /**
@@ -87,23 +92,25 @@ final class AuditProgram {
 
     private AuditResult compute(Site site, Survey survey) {
         final StreamAnalysis analysis = new StreamAnalysis(site);
-        final Progress progress = new Progress(err, System::nanoTime);
+        final Progress progress = new Progress(err, clock);
         final List<StreamFigures> figures = new ArrayList<>();
         final List<Problem> problems = new ArrayList<>(survey.problems());
+        int done = 0;
         for (SurveyLine stream : survey.lines()) {
             try {
                 figures.add(analysis.of(stream));
             } catch (CellRefusedException e) {
                 problems.add(new Problem(survey.file(), stream.line(), 0, e.what(), e.accepted()));
-            } catch (OutOfRangeException e) {
+            } catch (IllegalArgumentException | FlashException | SolveException e) {
                 problems.add(new Problem(
                         survey.file(),
                         stream.line(),
                         0,
-                        "the state of the stream is outside what the property model covers: " + e.getMessage(),
-                        "temperatures and a pressure within that range"));
+                        "the property model cannot give a state of this stream: " + e.getMessage(),
+                        "temperatures, a pressure and a composition within the range of the model"));
             }
-            progress.report(figures.size(), survey.lines().size(), "streams");
+            done++;
+            progress.report(done, survey.lines().size(), "streams");
         }
         problems.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
         return new AuditResult(site, survey, figures, problems);

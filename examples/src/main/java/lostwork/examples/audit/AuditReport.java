@@ -75,7 +75,7 @@ final class AuditReport {
                     Decimals.shortest(figures.stream().supply().inCelsius()),
                     Decimals.shortest(figures.stream().lowest().inCelsius()),
                     ifAny(figures, kilowatts(figures.heat().value())),
-                    kilowatts(figures.exergyAtSupply()),
+                    figures.exergyAtSupply().map(AuditReport::kilowatts).orElse(NONE),
                     figures.quality().map(AuditReport::percent).orElse(NONE),
                     ifAny(figures, kilowatts(figures.mostWork().value())));
         }

@@ -27,8 +27,8 @@ final class AuditRules {
                     + " carbon intensity of the grid. Worth is not profit: no machine is paid for.";
 
     static final String UNCERTAINTY = "Range: flow and supply temperature are taken as independent; the half-width is"
-            + " sqrt((W uf)^2 + ((W(T1 + uT) - W(T1 - uT))/2)^2) after JCGM 100:2008 (GUM), 5.1.2 and 5.1.3 note 2, with"
-            + " the coverage of the uncertainties in the survey. Composition, pressure and the likely-work rule itself are"
+            + " sqrt((W uf)^2 + (dW/dT1 uT)^2) after JCGM 100:2008 (GUM), 5.1.2, with the coverage of the uncertainties in"
+            + " the survey. Composition, pressure and the likely-work rule itself are"
             + " not part of it.";
 
     static final String CAUTION = "Engineering estimates, not a design. Pressure equipment, steam and hot gas are"

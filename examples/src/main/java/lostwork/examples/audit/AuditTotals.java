@@ -8,7 +8,7 @@ import lostwork.quantity.Power;
  * Sums over the streams of an audit.
  *
  * @param heat heat rejected
- * @param exergyAtSupply flow exergy as the streams leave
+ * @param exergyAtSupply flow exergy as the streams leave, of those that have one
  * @param mostWork reversible work
  * @param likelyWork likely work
  * @param heatPerYear heat in a year
@@ -30,7 +30,7 @@ record AuditTotals(
         Energy workPerYear = Energy.joules(0);
         for (StreamFigures figures : streams) {
             heat = heat.plus(figures.heat().value());
-            exergy = exergy.plus(figures.exergyAtSupply());
+            exergy = exergy.plus(figures.exergyAtSupply().orElse(Power.watts(0)));
             most = most.plus(figures.mostWork().value());
             likely = likely.plus(figures.likelyWork().value());
             heatPerYear = heatPerYear.plus(figures.heatPerYear());

@@ -1,20 +1,22 @@
 package lostwork.examples.audit;
 
+import lostwork.exergy.CurzonAhlborn;
 import lostwork.exergy.ReferenceEnvironment;
+import lostwork.exergy.TemperatureGlide;
 import lostwork.fluid.Fluid;
 import lostwork.fluid.FluidState;
 import lostwork.quantity.Pressure;
 import lostwork.quantity.SpecificEnergy;
+import lostwork.quantity.SpecificHeatCapacity;
 import lostwork.quantity.Temperature;
 
 /**
- * What one kilogram of a stream yields when it is cooled at constant pressure to a lowest temperature, while the
- * surroundings stay at T0.
+ * What one kilogram of a stream yields when it is cooled at constant pressure from T1 to T2, while the surroundings stay
+ * at T0, T1 > T2 >= T0.
  *
- * <p>Heat: {@code h(T) - h(T2)}. Reversible work: {@code h(T) - h(T2) - T0 (s(T) - s(T2))}, which is the difference of
- * the flow exergies. Endoreversible work: {@code integral of (1 - sqrt(T0/T)) dh} from T2 to T, the efficiency at most
- * power of Curzon and Ahlborn (American Journal of Physics 43, 1975, 22-24) applied to each slice of heat at its own
- * temperature.
+ * <p>Heat: {@code h1 - h2}. Reversible work: {@code h1 - h2 - T0 (s1 - s2)}, which is the difference of the flow
+ * exergies. Endoreversible work: {@code integral of (1 - sqrt(T0/T)) cp dT} from T2 to T1, the efficiency at most power of
+ * {@link CurzonAhlborn} applied to each slice of heat at its own temperature.
  */
 final class CoolingPath {
     /** Even count of Simpson intervals; the integrand is smooth, and 256 leave an error below 1e-9 of the heat. */
@@ -22,58 +24,58 @@ final class CoolingPath {
 
     private final Fluid fluid;
     private final Pressure pressure;
-    private final double lowestKelvin;
-    private final ReferenceEnvironment ambient;
-    private final double ambientKelvin;
+    private final FluidState hot;
     private final FluidState cold;
+    private final ReferenceEnvironment ambient;
+
+    /**
+     * A figure per kilogram.
+     *
+     * @param value the figure
+     * @param perKelvin its derivative with respect to the supply temperature T1
+     */
+    record Yield(SpecificEnergy value, SpecificHeatCapacity perKelvin) {}
 
     /**
      * Describes a path.
      *
      * @param fluid what is cooled
      * @param pressure its absolute pressure
+     * @param supply the temperature T1 that it comes with
      * @param lowest the temperature T2 that it is cooled to
      * @param ambient the surroundings at T0
      */
-    CoolingPath(Fluid fluid, Pressure pressure, Temperature lowest, ReferenceEnvironment ambient) {
+    CoolingPath(Fluid fluid, Pressure pressure, Temperature supply, Temperature lowest, ReferenceEnvironment ambient) {
         this.fluid = fluid;
         this.pressure = pressure;
-        this.lowestKelvin = lowest.inKelvin();
-        this.ambient = ambient;
-        this.ambientKelvin = ambient.temperature().inKelvin();
+        this.hot = fluid.state(supply, pressure);
         this.cold = fluid.state(lowest, pressure);
+        this.ambient = ambient;
     }
 
-    SpecificEnergy heatFrom(Temperature supply) {
-        return fluid.state(supply, pressure).enthalpy().minus(cold.enthalpy());
+    Yield heat() {
+        return new Yield(hot.enthalpy().minus(cold.enthalpy()), hot.isobaricHeatCapacity());
     }
 
-    SpecificEnergy reversibleWorkFrom(Temperature supply) {
-        final FluidState hot = fluid.state(supply, pressure);
-        return ambient.flowExergy(hot).minus(ambient.flowExergy(cold));
+    Yield reversibleWork() {
+        final SpecificEnergy work = ambient.heatExergy(heat().value(), TemperatureGlide.ofStream(hot, cold));
+        return new Yield(work, hot.isobaricHeatCapacity().times(ambient.carnotFactor(hot.temperature())));
     }
 
-    /** {@return the endoreversible work; by parts, so that only enthalpies are needed and no heat capacity} */
-    SpecificEnergy endoreversibleWorkFrom(Temperature supply) {
-        final double hotKelvin = supply.inKelvin();
-        final double step = (hotKelvin - lowestKelvin) / INTERVALS;
-        double sum = 0;
-        for (int i = 0; i <= INTERVALS; i++) {
-            final double kelvin = i == INTERVALS ? hotKelvin : lowestKelvin + i * step;
-            final double weight = i == 0 || i == INTERVALS ? 1 : i % 2 == 1 ? 4 : 2;
-            sum += weight * heat(kelvin) * slopeOfEfficiency(kelvin);
+    Yield endoreversibleWork() {
+        final double low = cold.temperature().inKelvin();
+        final double high = hot.temperature().inKelvin();
+        final double step = (high - low) / INTERVALS;
+        double sum = endoreversibleSlope(cold).si() + endoreversibleSlope(hot).si();
+        for (int i = 1; i < INTERVALS; i++) {
+            final FluidState between = fluid.state(Temperature.kelvin(low + i * step), pressure);
+            sum += (i % 2 == 1 ? 4 : 2) * endoreversibleSlope(between).si();
         }
-        final double hotEnd = heat(hotKelvin) * (1 - Math.sqrt(ambientKelvin / hotKelvin));
-        return SpecificEnergy.joulesPerKilogram(hotEnd - sum * step / 3);
+        return new Yield(SpecificEnergy.joulesPerKilogram(sum * step / 3), endoreversibleSlope(hot));
     }
 
-    private double heat(double kelvin) {
-        return fluid.state(Temperature.kelvin(kelvin), pressure).enthalpy().si()
-                - cold.enthalpy().si();
-    }
-
-    /** {@return d(1 - sqrt(T0/T))/dT} */
-    private double slopeOfEfficiency(double kelvin) {
-        return Math.sqrt(ambientKelvin / kelvin) / (2 * kelvin);
+    private SpecificHeatCapacity endoreversibleSlope(FluidState state) {
+        return state.isobaricHeatCapacity()
+                .times(CurzonAhlborn.engineEfficiency(state.temperature(), ambient.temperature()));
     }
 }

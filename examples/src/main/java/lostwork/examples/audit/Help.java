@@ -65,7 +65,8 @@ final class Help {
                 %s
                   Prices are in the label that currency names, such as "power price = 96 EUR/MWh".
 
-                Run once without arguments: the two example files are then in the output folder, to start from.
+                Run once without arguments: the two example files are then in the output folder, to start from. Files of an
+                earlier run in the same folder are replaced.
 
                 %s
                 """.formatted(

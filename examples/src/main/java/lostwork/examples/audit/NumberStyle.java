@@ -83,8 +83,13 @@ final class NumberStyle {
         return number.group(2).length() != 3 || before.isEmpty() || before.startsWith("0") || before.length() > 3;
     }
 
-    boolean isDecimalComma() {
-        return marks == Marks.COMMA;
+    /** {@return how numbers are read, as the end of a sentence; empty where that is not settled} */
+    String inWords() {
+        return switch (marks) {
+            case POINT -> " and a decimal point";
+            case COMMA -> " and a decimal comma";
+            case UNDECIDED, MIXED -> "";
+        };
     }
 
     /**

@@ -3,12 +3,10 @@ package lostwork.examples.audit;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Function;
 import lostwork.exergy.ReferenceEnvironment;
 import lostwork.fluid.FluidState;
 import lostwork.quantity.MassFlow;
 import lostwork.quantity.Power;
-import lostwork.quantity.SpecificEnergy;
 import lostwork.quantity.Temperature;
 
 /** Computes the figures of one stream against the ambient of a site. */
@@ -33,9 +31,13 @@ final class StreamAnalysis {
         final StreamFluid medium = StreamFluid.of(stream, site);
         final FluidState supply = medium.supplyState(stream);
         final MassFlow flow = medium.massFlow(stream.flow(), supply);
-        final Power exergy = ambient.flowExergy(supply).times(flow);
+        final Optional<Power> exergy = exergy(supply, flow);
         final Temperature lowest = higher(stream.lowest(), ambient.temperature());
         final List<String> notes = new ArrayList<>();
+        if (exergy.isEmpty()) {
+            notes.add("exergy not given: the model of " + medium.label() + " does not reach the ambient "
+                    + ambient.temperature());
+        }
         if (stream.supply().compareTo(lowest) <= 0) {
             notes.add(nothingToWin(stream));
             return new StreamFigures(
@@ -54,17 +56,27 @@ final class StreamAnalysis {
                     + ": cooling below ambient takes work");
         }
         condensation(medium, stream, lowest).ifPresent(notes::add);
-        final CoolingPath path = new CoolingPath(medium.fluid(), stream.pressure(), lowest, ambient);
+        final CoolingPath path = new CoolingPath(medium.fluid(), stream.pressure(), stream.supply(), lowest, ambient);
         return new StreamFigures(
                 stream,
                 medium.label(),
                 flow,
                 lowest,
                 exergy,
-                estimate(stream, flow, path::heatFrom),
-                estimate(stream, flow, path::reversibleWorkFrom),
-                estimate(stream, flow, path::endoreversibleWorkFrom),
+                estimate(stream, flow, path.heat()),
+                estimate(stream, flow, path.reversibleWork()),
+                estimate(stream, flow, path.endoreversibleWork()),
                 notes);
+    }
+
+    /** {@return the flow exergy; empty where the model does not hold at the ambient, as for liquid water in frost} */
+    private Optional<Power> exergy(FluidState supply, MassFlow flow) {
+        if (!supply.fluid()
+                .range()
+                .contains(ambient.temperature().si(), ambient.pressure().si())) {
+            return Optional.empty();
+        }
+        return Optional.of(ambient.flowExergy(supply).times(flow));
     }
 
     private String nothingToWin(SurveyLine stream) {
@@ -87,15 +99,12 @@ final class StreamAnalysis {
     }
 
     /** {@return a figure and its range, after the rule in {@link AuditRules#UNCERTAINTY}} */
-    private static Estimate estimate(SurveyLine stream, MassFlow flow, Function<Temperature, SpecificEnergy> perMass) {
-        final Power value = perMass.apply(stream.supply()).times(flow);
-        final Power above = perMass.apply(stream.supply().plus(stream.temperatureUncertainty()))
-                .times(flow);
-        final Power below = perMass.apply(stream.supply().minus(stream.temperatureUncertainty()))
-                .times(flow);
-        final double ofFlow = value.si() * stream.flowUncertainty().inFraction();
-        final double ofTemperature = (above.si() - below.si()) / 2;
-        return new Estimate(value, Power.watts(Math.hypot(ofFlow, ofTemperature)));
+    private static Estimate estimate(SurveyLine stream, MassFlow flow, CoolingPath.Yield yield) {
+        final Power value = yield.value().times(flow);
+        final Power ofFlow = value.times(stream.flowUncertainty());
+        final Power ofTemperature =
+                yield.perKelvin().times(stream.temperatureUncertainty()).times(flow);
+        return new Estimate(value, Power.watts(Math.hypot(ofFlow.si(), ofTemperature.si())));
     }
 
     private static Temperature higher(Temperature a, Temperature b) {

@@ -55,7 +55,7 @@ final class StreamCsv {
         cells.add(number(stream.pressure().inBar()));
         cells.add(number(figures.heat().value().inKilowatts()));
         cells.add(number(figures.heat().uncertainty().inKilowatts()));
-        cells.add(number(figures.exergyAtSupply().inKilowatts()));
+        cells.add(figures.exergyAtSupply().map(x -> number(x.inKilowatts())).orElse(""));
         cells.add(figures.quality().map(q -> number(q.inPercent())).orElse(""));
         cells.add(number(figures.mostWork().value().inKilowatts()));
         cells.add(number(figures.mostWork().uncertainty().inKilowatts()));

@@ -16,7 +16,7 @@ import lostwork.quantity.Temperature;
  * @param massFlow the mass flow, water vapour included
  * @param lowestCounted the temperature that heat and work are counted to: the lowest allowed or the ambient, whichever
  *     is higher
- * @param exergyAtSupply flow exergy at the supply state against the ambient
+ * @param exergyAtSupply flow exergy at the supply state against the ambient; empty where the model does not reach it
  * @param heat heat rejected between the supply temperature and the lowest counted
  * @param mostWork reversible work on that way, the difference of the flow exergies
  * @param likelyWork endoreversible work on that way
@@ -27,7 +27,7 @@ record StreamFigures(
         String mediumLabel,
         MassFlow massFlow,
         Temperature lowestCounted,
-        Power exergyAtSupply,
+        Optional<Power> exergyAtSupply,
         Estimate heat,
         Estimate mostWork,
         Estimate likelyWork,

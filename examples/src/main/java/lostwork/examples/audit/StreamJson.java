@@ -71,7 +71,10 @@ final class StreamJson {
                 .put("countedDownTo_C", figures.lowestCounted().inCelsius())
                 .put("pressure_bar", stream.pressure().inBar());
         estimate(json, "heat", figures.heat());
-        json.put("exergyAtSupply_kW", figures.exergyAtSupply().inKilowatts());
+        figures.exergyAtSupply()
+                .ifPresentOrElse(
+                        exergy -> json.put("exergyAtSupply_kW", exergy.inKilowatts()),
+                        () -> json.putNull("exergyAtSupply_kW"));
         figures.quality()
                 .ifPresentOrElse(
                         quality -> json.put("meanExergeticQuality_percent", quality.inPercent()),

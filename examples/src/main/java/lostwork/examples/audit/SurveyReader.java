@@ -65,8 +65,7 @@ final class SurveyReader {
 
     private List<String> remarks(SurveyHeading heading, NumberStyle style) {
         return heading.separator() == ';'
-                ? List.of(source.name() + " is read with semicolons between cells and a decimal "
-                        + (style.isDecimalComma() ? "comma." : "point."))
+                ? List.of(source.name() + " is read with semicolons between cells" + style.inWords() + ".")
                 : List.of();
     }
 

@@ -27,7 +27,8 @@ class AuditProgramTest {
         err.reset();
         final int code = new AuditProgram(
                         new PrintStream(out, true, StandardCharsets.UTF_8),
-                        new PrintStream(err, true, StandardCharsets.UTF_8))
+                        new PrintStream(err, true, StandardCharsets.UTF_8),
+                        () -> 0L)
                 .run(arguments);
         assertFalse(errors().contains("\tat "), errors());
         return code;
@@ -117,8 +118,7 @@ class AuditProgramTest {
                 problems.get(1));
         assertTrue(
                 problems.get(2)
-                        .startsWith(survey + ", line 5: the state of the stream is outside what the property model"
-                                + " covers: temperature = "),
+                        .startsWith(survey + ", line 5: the property model cannot give a state of this stream: "),
                 problems.get(2));
         assertTrue(output().contains("1 stream used, 3 lines refused, see the end of this report"), output());
         assertTrue(output().contains("A1"), output());
@@ -161,6 +161,38 @@ class AuditProgramTest {
         assertTrue(
                 unwrapped.contains("- moist: water condenses below 51 °C; its heat of condensation is not counted."),
                 unwrapped);
+    }
+
+    @Test
+    void aSiteInFrostKeepsItsWaterStreams() throws IOException {
+        assertEquals(0, run("--out", results().toString()));
+        final Path site = Files.writeString(
+                folder.resolve("site.txt"),
+                Files.readString(results().resolve("example-site.txt")).replace("= 12 °C", "= -10 °C"));
+        assertEquals(0, run("--site", site.toString(), "--out", results().toString()), errors());
+        final String unwrapped = output().replace("\n  ", " ");
+        assertTrue(
+                unwrapped.contains("- G7 hot-water return: exergy not given: the model of water does not reach the"
+                        + " ambient -10 °C."),
+                unwrapped);
+        // heat times (1 - T0/Tm), Tm the logarithmic mean of 88 °C and 60 °C; heat as at 12 °C
+        assertEquals(1792.7 * (1 - 263.15 / 346.96), Double.parseDouble(row("G7 hot-water return")[12]), 1);
+    }
+
+    private String[] row(String tag) throws IOException {
+        return Files.readAllLines(results().resolve("streams.csv")).stream()
+                .map(line -> line.split(","))
+                .filter(cells -> cells[1].equals(tag))
+                .findFirst()
+                .orElseThrow();
+    }
+
+    @Test
+    void waterNearBoilingKeepsItsRange() throws IOException {
+        final Path survey = survey(SurveyText.HEADING, "W,water,,10 t/h,99.5 °C,60 °C,1013 mbar,8000,0 %,2 K");
+        assertEquals(0, run("--survey", survey.toString(), "--out", results().toString()), errors());
+        // 2 K of liquid water, 4.22 kJ/(kg K) (table A-9 of Cengel and Boles, from memory), 2.778 kg/s
+        assertEquals(2 * 4.22 * 10 / 3.6, cell("W", 9), 0.1);
     }
 
     @Test

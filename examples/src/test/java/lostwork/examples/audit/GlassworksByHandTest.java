@@ -66,7 +66,7 @@ class GlassworksByHandTest {
     @BeforeAll
     static void runsTheProgram() throws Exception {
         final PrintStream nowhere = new PrintStream(OutputStream.nullOutputStream(), true, StandardCharsets.UTF_8);
-        assertEquals(0, new AuditProgram(nowhere, nowhere).run("--out", folder.toString()));
+        assertEquals(0, new AuditProgram(nowhere, nowhere, () -> 0L).run("--out", folder.toString()));
         final List<String> lines = Files.readAllLines(folder.resolve("streams.csv"));
         for (String line : lines.subList(1, lines.size())) {
             final String[] cells = line.replaceAll("\"[^\"]*\"", "quoted").split(",", -1);
