@@ -355,6 +355,16 @@ public final class ReferenceEnvironment implements Serializable {
     }
 
     /**
+     * {@return the exergy that travels with a heat per mass, in its direction: {@code (1 - T0/T) q}}
+     *
+     * @param heat the heat per mass of some stream
+     * @param at the temperature at which it crosses the boundary
+     */
+    public SpecificEnergy heatExergy(SpecificEnergy heat, Temperature at) {
+        return heat.times(carnotFactor(at));
+    }
+
+    /**
      * {@return the exergy that travels with a heat per mass at sliding temperature, in its direction}
      *
      * @param heat the heat per mass of some stream

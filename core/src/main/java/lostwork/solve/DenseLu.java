@@ -126,14 +126,17 @@ public final class DenseLu {
                 lu[p * n + column] = entry;
             }
         }
-        final double pivot = lu[k * n + k];
+        final double[] a = lu;
+        final int pivotStart = k * n;
+        final double pivot = a[pivotStart + k];
         for (int row = k + 1; row < n; row++) {
-            final double entry = lu[row * n + k];
+            final int start = row * n;
+            final double entry = a[start + k];
             if (entry != 0) {
                 final double factor = entry / pivot;
-                lu[row * n + k] = factor;
+                a[start + k] = factor;
                 for (int column = k + 1; column < n; column++) {
-                    lu[row * n + column] -= factor * lu[k * n + column];
+                    a[start + column] -= factor * a[pivotStart + column];
                 }
             }
         }
@@ -180,6 +183,7 @@ public final class DenseLu {
     }
 
     private void forward(double[] x) {
+        final double[] a = lu;
         for (int k = 0; k < n; k++) {
             final int p = pivotRow[k];
             final double entry = x[p];
@@ -187,33 +191,38 @@ public final class DenseLu {
             x[k] = entry;
         }
         for (int row = 1; row < n; row++) {
+            final int start = row * n;
             double sum = x[row];
             for (int column = 0; column < row; column++) {
-                sum -= lu[row * n + column] * x[column];
+                sum -= a[start + column] * x[column];
             }
             x[row] = sum;
         }
         for (int row = n - 1; row >= 0; row--) {
+            final int start = row * n;
             double sum = x[row];
             for (int column = row + 1; column < n; column++) {
-                sum -= lu[row * n + column] * x[column];
+                sum -= a[start + column] * x[column];
             }
-            x[row] = sum / lu[row * n + row];
+            x[row] = sum / a[start + row];
         }
     }
 
     private void transposed(double[] x) {
+        final double[] a = lu;
         for (int k = 0; k < n; k++) {
-            final double entry = x[k] / lu[k * n + k];
+            final int start = k * n;
+            final double entry = x[k] / a[start + k];
             x[k] = entry;
             for (int column = k + 1; column < n; column++) {
-                x[column] -= lu[k * n + column] * entry;
+                x[column] -= a[start + column] * entry;
             }
         }
         for (int k = n - 1; k > 0; k--) {
+            final int start = k * n;
             final double entry = x[k];
             for (int column = 0; column < k; column++) {
-                x[column] -= lu[k * n + column] * entry;
+                x[column] -= a[start + column] * entry;
             }
         }
         for (int k = n - 1; k >= 0; k--) {

@@ -9,6 +9,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.List;
 import lostwork.quantity.MassFlow;
 import lostwork.quantity.Power;
+import lostwork.quantity.Pressure;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.function.Executable;
 
@@ -79,6 +80,25 @@ class ReservoirLawsTest {
         final IllegalArgumentException e =
                 assertThrows(IllegalArgumentException.class, () -> TemperatureGlide.ofStream(hot, expanded));
         assertTrue(e.getMessage().contains("no mean temperature"), e.getMessage());
+    }
+
+    /** Both ways to name one temperature are one thing, for heat and for entropy. */
+    @Test
+    void aConstantGlideIsItsTemperature() {
+        final var site = ReferenceEnvironment.of(celsius(15), Pressure.bar(1));
+        final var glide = TemperatureGlide.constant(celsius(240));
+        assertEquals(glide, TemperatureGlide.between(celsius(240), celsius(240)));
+        assertEquals("240 °C", glide.toString());
+        final Power heat = Power.kilowatts(7);
+        assertEquals(site.heatExergy(heat, celsius(240)), site.heatExergy(heat, glide));
+        final var atPoint = EntropyBalance.empty().heatIn(heat, celsius(240)).heatOut(heat, celsius(15));
+        final var overGlide =
+                EntropyBalance.empty().heatIn(heat, glide).heatOut(heat, TemperatureGlide.constant(celsius(15)));
+        assertEquals(atPoint.generation(), overGlide.generation());
+        assertEquals(
+                site.heatExergy(heat, glide).si(),
+                GouyStodola.lostPower(atPoint.generation(), site).si(),
+                1e-9);
     }
 
     @Test

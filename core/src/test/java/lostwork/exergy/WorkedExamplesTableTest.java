@@ -110,7 +110,7 @@ class WorkedExamplesTableTest {
                 .minus(environment.flowExergy(outlet))
                 .minus(kineticOut);
         PrintedValue.of("691.84").assertMatches(drop.inKilojoulesPerKilogram(), "drop of flow exergy, kJ/kg");
-        final SpecificEnergy withHeat = environment.heatExergy(heat, TemperatureGlide.constant(kelvin(350)));
+        final SpecificEnergy withHeat = environment.heatExergy(heat, kelvin(350));
         PrintedValue.of("-3.36").assertMatches(withHeat.inKilojoulesPerKilogram(), "exergy with heat, kJ/kg");
         PrintedValue.of("148.48")
                 .assertMatches(withHeat.minus(work).plus(drop).inKilojoulesPerKilogram(), "exergy destruction, kJ/kg");
