@@ -1,21 +1,29 @@
 package lostwork.component;
 
-import lostwork.plant.Component;
 import lostwork.plant.Equations;
-import lostwork.plant.FlowPath;
 import lostwork.plant.HeatInlet;
-import lostwork.plant.Inlet;
-import lostwork.plant.Outlet;
 import lostwork.plant.Variable;
 import lostwork.quantity.Power;
-import lostwork.quantity.PressureDifference;
 
-/** A stream that takes up heat from a port. */
-public final class Heater extends Component implements FlowPath {
-    private final Inlet inlet = inlet("inlet");
-    private final Outlet outlet = outlet("outlet");
+/**
+ * A stream that takes up heat from a port: boiler, evaporator, combustion chamber of an air-standard cycle.
+ *
+ * <h2>Equations</h2>
+ *
+ * <pre>
+ * energy balance          Q̇ = ṁ (h₂ − h₁)
+ * pressure loss           p₁ − p₂
+ * relative pressure loss  (p₁ − p₂) / p₁
+ * </pre>
+ *
+ * <p>The heat counts positive into the stream. No pressure loss is assumed; the assumption gives way to a given loss, or
+ * to given pressures at inlet and outlet. The temperature of the heat port is that of the source; only where it is given
+ * does the second law have anything to check.
+ *
+ * <p>Source: the first law of an open system without work.
+ */
+public final class Heater extends HeatedFlow {
     private final HeatInlet heat = heatInlet("heat");
-    private final Variable<PressureDifference> pressureLoss = variable("pressure loss", PressureDifference.KIND);
 
     /**
      * Creates a heater.
@@ -26,39 +34,23 @@ public final class Heater extends Component implements FlowPath {
         super(name);
     }
 
-    @Override
-    public Inlet inlet() {
-        return inlet;
-    }
-
-    @Override
-    public Outlet outlet() {
-        return outlet;
-    }
-
     /** {@return where the heat enters; its temperature is that of the source} */
     public HeatInlet heat() {
         return heat;
     }
 
-    /** {@return the heat rate} */
+    /** {@return the heat rate, positive into the stream} */
     public Variable<Power> duty() {
         return heat.rate();
     }
 
-    /** {@return the pressure at the inlet less that at the outlet; none is assumed unless something else is given} */
-    public Variable<PressureDifference> pressureLoss() {
-        return pressureLoss;
-    }
-
     @Override
     protected void describe(Equations e) {
-        e.sameFlow(inlet, outlet);
+        e.sameFlow(inlet(), outlet());
         e.law(
                 "energy balance",
                 heat.rate(),
-                inlet.flow().times(outlet.enthalpy().minus(inlet.enthalpy())));
-        e.law("pressure loss", pressureLoss, inlet.pressure().minus(outlet.pressure()));
-        e.assume("no pressure loss", pressureLoss, PressureDifference.pascals(0));
+                inlet().flow().times(outlet().enthalpy().minus(inlet().enthalpy())));
+        describePressureLoss(e);
     }
 }

@@ -1,0 +1,56 @@
+package lostwork.component;
+
+import lostwork.plant.Equations;
+import lostwork.plant.Expression;
+import lostwork.plant.ShaftInlet;
+import lostwork.plant.Variable;
+import lostwork.quantity.Power;
+
+/**
+ * An adiabatic compressor, fan or blower.
+ *
+ * <h2>Equations</h2>
+ *
+ * <pre>
+ * isentropic efficiency  ηₛ (h₂ − h₁) = h(p₂, s₁) − h₁
+ * power                  P = ṁ (h₂ − h₁)
+ * pressure ratio         p₂ / p₁
+ * </pre>
+ *
+ * <p>The power counts positive into the machine. States are static or total ones, as the user reads them; kinetic
+ * energy is not added.
+ *
+ * <p>Source: the definition of the isentropic efficiency, in every textbook of engineering thermodynamics.
+ */
+public final class Compressor extends FlowMachine {
+    private final ShaftInlet shaft = shaftInlet("shaft");
+
+    /**
+     * Creates a compressor.
+     *
+     * @param name its name
+     */
+    public Compressor(String name) {
+        super(name);
+    }
+
+    /** {@return where the power enters} */
+    public ShaftInlet shaft() {
+        return shaft;
+    }
+
+    /** {@return the shaft power, positive into the machine} */
+    public Variable<Power> power() {
+        return shaft.power();
+    }
+
+    @Override
+    protected void describe(Equations e) {
+        final Expression rise = outlet().enthalpy().minus(inlet().enthalpy());
+        final Expression idealRise = isentropicOutletEnthalpy().minus(inlet().enthalpy());
+        e.sameFlow(inlet(), outlet());
+        e.model("isentropic efficiency", isentropicEfficiency().times(rise), idealRise);
+        e.law("power", shaft.power(), inlet().flow().times(rise));
+        describeRatios(e, outlet().pressure(), inlet().pressure());
+    }
+}
