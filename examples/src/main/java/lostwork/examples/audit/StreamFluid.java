@@ -142,14 +142,8 @@ final class StreamFluid {
      * @param pressure the absolute pressure of the gas
      */
     Optional<Temperature> waterDewPoint(Pressure pressure) {
-        final double partialPressure = vapourShare.inFraction() * pressure.inPascal();
-        final double least =
-                611.3; // triple point of water; a gas with less vapour forms frost, far below all ambients here
-        if (!(partialPressure > least
-                && partialPressure < Water.industrial().criticalPressure().inPascal())) {
-            return Optional.empty();
-        }
-        return Optional.of(
-                Water.industrial().saturation(Pressure.pascal(partialPressure)).temperature());
+        return vapourShare.si() > 0 && fluid instanceof IdealGas gas
+                ? Optional.of(gas.waterDewPoint(pressure))
+                : Optional.empty();
     }
 }

@@ -127,8 +127,7 @@ final class SurveyReader {
                 known -> in.text(SurveyColumn.COMPOSITION, text -> new CompositionReader(style).read(known, text)));
         final Optional<SurveyFlow> flow = in.measured(SurveyColumn.FLOW, cell -> flowOf(medium, cell));
         final Optional<Temperature> supply = in.measured(SurveyColumn.SUPPLY, MeasuredCell::temperature);
-        final Optional<Temperature> lowest =
-                in.measured(SurveyColumn.LOWEST, cell -> lowest(cell, supply, heading.cell(row, SurveyColumn.SUPPLY)));
+        final Optional<Temperature> lowest = in.measured(SurveyColumn.LOWEST, cell -> lowest(cell, supply));
         final Optional<Pressure> pressure = in.measured(SurveyColumn.PRESSURE, cell -> cell.pressure(atmosphere));
         final Optional<Duration> hours = in.measured(SurveyColumn.HOURS, MeasuredCell::hoursPerYear);
         final Optional<Ratio> ofFlow = in.measured(SurveyColumn.FLOW_UNCERTAINTY, MeasuredCell::relativeUncertainty);
@@ -184,11 +183,11 @@ final class SurveyReader {
         }
     }
 
-    private static Temperature lowest(MeasuredCell cell, Optional<Temperature> supply, CsvRow.Cell supplyCell) {
+    private static Temperature lowest(MeasuredCell cell, Optional<Temperature> supply) {
         final Temperature lowest = cell.temperature();
         if (supply.isPresent() && lowest.compareTo(supply.get()) > 0) {
             throw new CellRefusedException(
-                    "the lowest temperature " + cell + " is above the supply temperature " + supplyCell.text(),
+                    "the lowest temperature " + cell + " is above the supply temperature " + supply.get(),
                     "a temperature from absolute zero up to the supply temperature");
         }
         return lowest;
