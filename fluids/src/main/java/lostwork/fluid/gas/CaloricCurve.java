@@ -80,6 +80,26 @@ final class CaloricCurve {
     }
 
     /**
+     * {@return the largest jump where two ranges meet: of cp/R relative, of H/RT, of S/R}
+     *
+     * @param limits limits of the ranges in K, ascending
+     * @param coefficients a1 to a7, b1, b2 of each range, as printed
+     */
+    static double largestJump(double[] limits, double[][] coefficients) {
+        double largest = 0;
+        for (int i = 1; i < coefficients.length; i++) {
+            final Segment below = new Segment(coefficients[i - 1]);
+            final Segment above = new Segment(coefficients[i]);
+            final double t = limits[i];
+            final double ln = Math.log(t);
+            largest = Math.max(largest, Math.abs(above.heatCapacity(t) / below.heatCapacity(t) - 1));
+            largest = Math.max(largest, Math.abs(above.enthalpy(t, ln) - below.enthalpy(t, ln)) / t);
+            largest = Math.max(largest, Math.abs(above.entropy(t, ln) - below.entropy(t, ln)));
+        }
+        return largest;
+    }
+
+    /**
      * {@return the weighted sum of curves, over the temperatures that all of them cover}
      *
      * @param curves the curves

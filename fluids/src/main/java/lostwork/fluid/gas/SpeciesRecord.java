@@ -19,6 +19,15 @@ record SpeciesRecord(
     /** The gas constant of the source, J/(mol K): only with it do the integration constants give its enthalpies. */
     static final double GAS_CONSTANT_OF_SOURCE = 8.31451;
 
+    /** Largest jump between ranges that the rounding of printed digits explains; see the species index. */
+    private static final double LARGEST_JUMP = 1e-6;
+    /** The same for a liquid, whose coefficients of 1e9 with ten digits cancel. */
+    private static final double LARGEST_JUMP_OF_LIQUID = 1e-4;
+    /** How far the enthalpy at 298.15 K may be from the printed formation enthalpy, in J/mol. */
+    private static final double ENTHALPY_TOLERANCE = 0.2;
+
+    private static final double REFERENCE_TEMPERATURE_K = 298.15;
+
     static SpeciesRecord read(DataFile file) {
         String name = "";
         String description = "";
@@ -75,10 +84,20 @@ record SpeciesRecord(
         if (coefficients.isEmpty() || coefficients.size() != limits.size() - 1) {
             throw file.failure("the coefficients of a range are missing");
         }
-        final CaloricCurve curve = CaloricCurve.ofRanges(
-                limits.stream().mapToDouble(Double::doubleValue).toArray(),
-                coefficients.toArray(double[][]::new),
-                GAS_CONSTANT_OF_SOURCE);
+        final double[] joints = limits.stream().mapToDouble(Double::doubleValue).toArray();
+        final double[][] printed = coefficients.toArray(double[][]::new);
+        final double jump = CaloricCurve.largestJump(joints, printed);
+        final double allowed = aggregation == Species.Aggregation.LIQUID ? LARGEST_JUMP_OF_LIQUID : LARGEST_JUMP;
+        if (!(jump <= allowed)) {
+            throw file.failure("the ranges meet with a jump of " + jump + " in cp/R, H/RT or S/R; " + "more than "
+                    + allowed + " is a wrong digit");
+        }
+        final CaloricCurve curve = CaloricCurve.ofRanges(joints, printed, GAS_CONSTANT_OF_SOURCE);
+        final double atReference = curve.enthalpy(REFERENCE_TEMPERATURE_K);
+        if (!(Math.abs(atReference - formationEnthalpy) <= ENTHALPY_TOLERANCE)) {
+            throw file.failure("the enthalpy at 298.15 K is " + atReference + " J/mol, not the formation enthalpy "
+                    + formationEnthalpy + " J/mol; one of them has a wrong digit");
+        }
         return new SpeciesRecord(
                 name,
                 description,

@@ -20,10 +20,10 @@ class DataFileTest {
             status = verified
             range, K = 200.0 1000.0
             a1..a7 = 0 0 3.5 0 0 0 0
-            b1 b2 = 0 0
+            b1 b2 = -1043.525 0
             range, K = 1000.0 2000.0
             a1..a7 = 0 0 3.5 0 0 0 0
-            b1 b2 = 0 0
+            b1 b2 = -1043.525 0.0
             """;
 
     private static SpeciesRecord read(String text) {
@@ -56,7 +56,10 @@ class DataFileTest {
         refuses("molar mass, g/mol = 2.01588", "molar mass, g/mol = 2,01588", 6, "'2,01588' is not a number");
         refuses("a1..a7 = 0 0 3.5 0 0 0 0", "a1..a7 = 0 0 3.5 0 0 0", 11, "expected 7 numbers");
         refuses("a1..a7 = 0 0 3.5 0 0 0 0", "a1..a7 = 0 0 NaN 0 0 0 0", 11, "not a finite number");
-        refuses("b1 b2 = 0 0\nrange", "range", 14, "three lines");
+        refuses("b1 b2 = -1043.525 0\nrange", "range", 14, "three lines");
+        refuses("b1 b2 = -1043.525 0.0", "b1 b2 = -1043.535 0.0", 0, "jump");
+        refuses("b1 b2 = -1043.525 0.0", "b1 b2 = -1043.525 0.1", 0, "jump");
+        refuses("J/mol = 0.0", "J/mol = 100.0", 0, "formation enthalpy");
         refuses("range, K = 1000.0 2000.0", "range, K = 1100.0 2000.0", 13, "does not begin where");
         refuses("range, K = 200.0 1000.0", "range, K = 1000.0 200.0", 10, "ends at or below");
         refuses("status = verified", "stutas = verified", 9, "unknown key 'stutas'");
