@@ -116,7 +116,7 @@ public final class Density extends LinearQuantity<Density> {
     /**
      * {@return one over this value, as a specific volume}
      *
-     * @throws IllegalArgumentException if this value is zero
+     * @throws OutOfRangeException if this value is zero
      */
     public SpecificVolume inverse() {
         return SpecificVolume.cubicMetresPerKilogram(1 / si());

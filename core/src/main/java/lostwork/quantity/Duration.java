@@ -1,5 +1,8 @@
 package lostwork.quantity;
 
+import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.math.RoundingMode;
 import java.util.List;
 import javax.measure.Quantity;
 
@@ -87,6 +90,15 @@ public final class Duration extends LinearQuantity<Duration> {
      */
     public static Duration of(Quantity<?> quantity) {
         return KIND.of(quantity);
+    }
+
+    /**
+     * {@return a duration from one of the Java library}
+     *
+     * @param duration the duration of the Java library
+     */
+    public static Duration of(java.time.Duration duration) {
+        return new Duration(duration.getSeconds() + duration.getNano() / 1e9);
     }
 
     /**
@@ -186,6 +198,17 @@ public final class Duration extends LinearQuantity<Duration> {
      */
     public Length times(Speed speed) {
         return Length.metres(si() * speed.si());
+    }
+
+    /**
+     * {@return this duration as one of the Java library, rounded to a nanosecond}
+     *
+     * @throws ArithmeticException if it is longer than that type can hold, some 292 thousand million years
+     */
+    public java.time.Duration toJavaTime() {
+        final BigDecimal nanoseconds = new BigDecimal(si()).movePointRight(9).setScale(0, RoundingMode.HALF_EVEN);
+        final BigInteger[] parts = nanoseconds.toBigInteger().divideAndRemainder(BigInteger.valueOf(1_000_000_000));
+        return java.time.Duration.ofSeconds(parts[0].longValueExact(), parts[1].longValueExact());
     }
 
     @Override

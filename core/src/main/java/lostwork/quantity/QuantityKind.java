@@ -329,12 +329,15 @@ public final class QuantityKind<Q extends ScalarQuantity<Q, D>, D extends Linear
         final List<Unit<Q>> alike = units.stream()
                 .filter(u -> UnitSymbol.key(u.symbol().toLowerCase(Locale.ROOT)).equals(small))
                 .toList();
-        throw QuantityText.refusal(
-                text,
-                this,
-                alike.size() == 1
-                        ? quoted + " is no unit of it: capital and small letters differ, write " + alike.get(0)
-                        : quoted + " is no unit of it");
+        final String advice;
+        if (alike.size() == 1) {
+            advice = ": capital and small letters differ, write " + alike.get(0);
+        } else if (dimension.money() != 0) {
+            advice = ": write ¤ for the currency, whichever it is";
+        } else {
+            advice = "";
+        }
+        throw QuantityText.refusal(text, this, quoted + " is no unit of it" + advice);
     }
 
     /**

@@ -125,7 +125,7 @@ public final class SpecificVolume extends LinearQuantity<SpecificVolume> {
     /**
      * {@return one over this value, as a density}
      *
-     * @throws IllegalArgumentException if this value is zero
+     * @throws OutOfRangeException if this value is zero
      */
     public Density inverse() {
         return Density.kilogramsPerCubicMetre(1 / si());

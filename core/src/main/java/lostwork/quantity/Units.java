@@ -14,13 +14,13 @@ public final class Units {
     private Units() {}
 
     /** Degrees Celsius, for a temperature. */
-    public static final Unit<Temperature> CELSIUS = Unit.withOffset("°C", 1, 1, 273.15, "degC");
+    public static final Unit<Temperature> CELSIUS = Unit.withOffset("°C", 1, 1, 273.15, "degC", "deg C");
 
     /** Kelvin, for a temperature. */
     public static final Unit<Temperature> KELVIN = Unit.of("K", 1);
 
     /** Degrees Fahrenheit, for a temperature. */
-    public static final Unit<Temperature> FAHRENHEIT = Unit.withOffset("°F", 5, 9, 459.67, "degF");
+    public static final Unit<Temperature> FAHRENHEIT = Unit.withOffset("°F", 5, 9, 459.67, "degF", "deg F");
 
     /** Degrees Rankine, for a temperature. */
     public static final Unit<Temperature> RANKINE = Unit.ofQuotient("°R", 5, 9, "degR");

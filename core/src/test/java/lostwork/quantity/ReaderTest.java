@@ -129,6 +129,12 @@ class ReaderTest {
     }
 
     @Test
+    void pricesAreReadInTheOneCurrencyThatTheCallerKnows() {
+        assertEquals(EnergyPrice.perMegawattHour(95), EnergyPrice.parse("95 ¤/MWh"));
+        assertTrue(refusal(EnergyPrice.KIND, "95 €/MWh").contains("write ¤ for the currency"));
+    }
+
+    @Test
     void aSpanIsNotReadFromDegreesCelsius() {
         assertTrue(refusal(TemperatureSpan.KIND, "5 °C").contains("write a span in K"));
         assertEquals(TemperatureSpan.kelvins(5), TemperatureSpan.parse("5 K"));

@@ -2,6 +2,7 @@ package lostwork.quantity;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.lang.reflect.Method;
@@ -128,6 +129,17 @@ class ValueTest {
         assertEquals(0.06242796, SpecificVolume.cubicFeetPerPound(1).si(), 5e-9);
         assertEquals(212, Temperature.celsius(100).inFahrenheit(), 1e-12);
         assertEquals(491.67, Temperature.celsius(0).inRankine(), 1e-12);
+    }
+
+    @Test
+    void durationsOfTheJavaLibraryComeAndGo() {
+        final java.time.Duration theirs = java.time.Duration.ofSeconds(-3, 250_000_000);
+        assertEquals(-2.75, Duration.of(theirs).inSeconds());
+        assertEquals(theirs, Duration.seconds(-2.75).toJavaTime());
+        assertEquals(java.time.Duration.ofHours(8760), Duration.years(1).toJavaTime());
+        assertEquals(java.time.Duration.ofNanos(1), Duration.seconds(0.6e-9).toJavaTime());
+        final Duration endless = Duration.seconds(1e19);
+        assertThrows(ArithmeticException.class, endless::toJavaTime);
     }
 
     @Test
