@@ -4,5 +4,7 @@ module lostwork.cycles {
     requires static transitive org.jspecify;
 
     exports lostwork.component;
+    exports lostwork.ledger;
     exports lostwork.plant;
+    exports lostwork.report;
 }

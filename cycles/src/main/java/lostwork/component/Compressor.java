@@ -1,6 +1,7 @@
 package lostwork.component;
 
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Expression;
 import lostwork.plant.ShaftInlet;
 import lostwork.plant.Variable;
@@ -42,6 +43,11 @@ public final class Compressor extends FlowMachine {
     /** {@return the shaft power, positive into the machine} */
     public Variable<Power> power() {
         return shaft.power();
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative().withFuel(shaft).withProductRise(inlet(), outlet());
     }
 
     @Override

@@ -1,6 +1,7 @@
 package lostwork.component;
 
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.HeatOutlet;
 import lostwork.plant.Variable;
 import lostwork.quantity.Power;
@@ -42,6 +43,11 @@ public final class Cooler extends HeatedFlow {
     /** {@return the heat rate, positive out of the stream} */
     public Variable<Power> duty() {
         return heat.rate();
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative();
     }
 
     @Override

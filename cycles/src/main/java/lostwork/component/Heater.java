@@ -1,6 +1,7 @@
 package lostwork.component;
 
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.HeatInlet;
 import lostwork.plant.Variable;
 import lostwork.quantity.Power;
@@ -42,6 +43,11 @@ public final class Heater extends HeatedFlow {
     /** {@return the heat rate, positive into the stream} */
     public Variable<Power> duty() {
         return heat.rate();
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative().withFuel(heat).withProductRise(inlet(), outlet());
     }
 
     @Override

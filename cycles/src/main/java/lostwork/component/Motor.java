@@ -2,6 +2,7 @@ package lostwork.component;
 
 import lostwork.plant.Component;
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Expression;
 import lostwork.plant.HeatOutlet;
 import lostwork.plant.ShaftOutlet;
@@ -63,6 +64,11 @@ public final class Motor extends Component {
     /** {@return mechanical over electric power; 100 % is assumed unless something else is given} */
     public Variable<Ratio> efficiency() {
         return efficiency;
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative().withFuel(wire).withProduct(shaft);
     }
 
     @Override

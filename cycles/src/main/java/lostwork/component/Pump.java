@@ -1,6 +1,7 @@
 package lostwork.component;
 
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Expression;
 import lostwork.plant.ShaftInlet;
 import lostwork.plant.Variable;
@@ -50,6 +51,11 @@ public final class Pump extends FlowMachine {
     /** {@return the pressure at the outlet less that at the inlet} */
     public Variable<PressureDifference> pressureRise() {
         return pressureRise;
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative().withFuel(shaft).withProductRise(inlet(), outlet());
     }
 
     @Override

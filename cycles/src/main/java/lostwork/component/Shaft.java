@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.stream.IntStream;
 import lostwork.plant.Component;
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Expression;
 import lostwork.plant.HeatOutlet;
 import lostwork.plant.ShaftInlet;
@@ -114,6 +115,18 @@ public final class Shaft extends Component {
     /** {@return the heat that the losses become} */
     public Variable<Power> losses() {
         return heatLoss.rate();
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        ExergyPurpose purpose = ExergyPurpose.dissipative();
+        for (ShaftInlet inlet : driving) {
+            purpose = purpose.withFuel(inlet);
+        }
+        for (ShaftOutlet outlet : driven) {
+            purpose = purpose.withProduct(outlet);
+        }
+        return purpose;
     }
 
     @Override

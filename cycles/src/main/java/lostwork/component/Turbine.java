@@ -1,6 +1,7 @@
 package lostwork.component;
 
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Expression;
 import lostwork.plant.ShaftOutlet;
 import lostwork.plant.Variable;
@@ -42,6 +43,11 @@ public final class Turbine extends FlowMachine {
     /** {@return the shaft power, positive out of the machine} */
     public Variable<Power> power() {
         return shaft.power();
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative().withFuelDrop(inlet(), outlet()).withProduct(shaft);
     }
 
     @Override

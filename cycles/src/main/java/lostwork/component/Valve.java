@@ -1,6 +1,7 @@
 package lostwork.component;
 
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Variable;
 import lostwork.quantity.PressureDifference;
 import lostwork.quantity.Ratio;
@@ -43,6 +44,11 @@ public final class Valve extends ThroughFlow {
     /** {@return the pressure at the inlet over that at the outlet, 1 or more} */
     public Variable<Ratio> pressureRatio() {
         return pressureRatio;
+    }
+
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative();
     }
 
     @Override

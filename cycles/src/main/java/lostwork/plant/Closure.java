@@ -38,7 +38,7 @@ public final class Closure {
             double energyGap = 0;
             for (Port port : component.ports()) {
                 if (port instanceof MaterialPort material) {
-                    final double sign = port instanceof Inlet ? 1 : -1;
+                    final double sign = port.isInlet() ? 1 : -1;
                     final double flow = si(solution, material.flow());
                     final double power = flow * si(solution, material.enthalpy());
                     massGap += sign * flow;
@@ -67,14 +67,14 @@ public final class Closure {
 
     /** Power into the component through a port that is not one of matter. */
     private static double signedPower(Solution solution, Port port) {
+        final double sign = port.isInlet() ? 1 : -1;
         if (port instanceof ShaftPort shaft) {
-            return (port instanceof ShaftInlet ? 1 : -1) * si(solution, shaft.power());
+            return sign * si(solution, shaft.power());
         }
         if (port instanceof WirePort wire) {
-            return (port instanceof WireInlet ? 1 : -1) * si(solution, wire.power());
+            return sign * si(solution, wire.power());
         }
-        final HeatPort heat = (HeatPort) port;
-        return (port instanceof HeatInlet ? 1 : -1) * si(solution, heat.rate());
+        return sign * si(solution, ((HeatPort) port).rate());
     }
 
     static EntropyBalance entropyGeneration(Solution solution, Component component) {
@@ -83,9 +83,7 @@ public final class Closure {
         for (Port port : component.ports()) {
             double flow = 0;
             if (port instanceof MaterialPort material) {
-                flow = (port instanceof Inlet ? -1 : 1)
-                        * si(solution, material.flow())
-                        * si(solution, material.entropy());
+                flow = (port.isInlet() ? -1 : 1) * si(solution, material.flow()) * si(solution, material.entropy());
             } else if (port instanceof HeatPort heat) {
                 final double temperature = si(solution, heat.temperature());
                 if (!Double.isNaN(temperature)) {

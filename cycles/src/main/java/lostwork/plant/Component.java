@@ -72,6 +72,18 @@ public abstract class Component {
     }
 
     /**
+     * {@return what the component is for in terms of exergy; without a statement of its own everything that enters is fuel
+     * and everything that leaves is product}
+     */
+    public ExergyPurpose purpose() {
+        ExergyPurpose purpose = ExergyPurpose.dissipative();
+        for (Port port : ports) {
+            purpose = port.isInlet() ? purpose.withFuel(port) : purpose.withProduct(port);
+        }
+        return purpose;
+    }
+
+    /**
      * States the equations of the component. Called once for each plant that the component is built into.
      *
      * @param e takes the equations
@@ -99,6 +111,7 @@ public abstract class Component {
      * variable.
      *
      * @param <Q> the quantity of its values
+     * @param <D> the quantity of a difference of two values
      * @param variableName its name, unique within the component
      * @param lowest the lowest value that a possible machine has
      * @param highest the highest value that a possible machine has

@@ -5,4 +5,9 @@ public final class HeatInlet extends HeatPort {
     HeatInlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return true;
+    }
 }

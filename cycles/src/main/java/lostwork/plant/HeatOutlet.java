@@ -5,4 +5,9 @@ public final class HeatOutlet extends HeatPort {
     HeatOutlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return false;
+    }
 }

@@ -5,4 +5,9 @@ public final class Inlet extends MaterialPort {
     Inlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return true;
+    }
 }

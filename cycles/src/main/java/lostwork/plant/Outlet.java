@@ -5,4 +5,9 @@ public final class Outlet extends MaterialPort {
     Outlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return false;
+    }
 }

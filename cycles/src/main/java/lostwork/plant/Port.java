@@ -20,6 +20,9 @@ public abstract class Port {
         return name;
     }
 
+    /** {@return whether what passes the port enters its component} */
+    public abstract boolean isInlet();
+
     /** {@return component and name, such as {@code turbine inlet}} */
     @Override
     public final String toString() {

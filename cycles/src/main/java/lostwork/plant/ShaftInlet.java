@@ -5,4 +5,9 @@ public final class ShaftInlet extends ShaftPort {
     ShaftInlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return true;
+    }
 }

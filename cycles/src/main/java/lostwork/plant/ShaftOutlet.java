@@ -5,4 +5,9 @@ public final class ShaftOutlet extends ShaftPort {
     ShaftOutlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return false;
+    }
 }

@@ -1,8 +1,9 @@
 package lostwork.plant;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import lostwork.report.Table;
+import lostwork.report.Table.Cell;
 
 /** Prints a solution as aligned tables. */
 final class SolutionText {
@@ -20,54 +21,59 @@ final class SolutionText {
 
     private static void states(Solution solution, StringBuilder text) {
         final Plant plant = solution.plant();
-        final List<String[]> rows = new ArrayList<>();
-        rows.add(new String[] {"stream", "fluid", "kg/s", "°C", "bar", "kJ/kg", "kJ/(kg K)", "vapour"});
+        final Table.Builder table = Table.builder()
+                .words("stream")
+                .words("fluid")
+                .numbers("flow", "kg/s", 4)
+                .numbers("temperature", "°C", 2)
+                .numbers("pressure", "bar", 4)
+                .numbers("enthalpy", "kJ/kg", 2)
+                .numbers("entropy", "kJ/(kg K)", 4)
+                .numbers("vapour", "", 4);
         for (Plant.Connection connection : plant.connections()) {
             if (connection.from() instanceof Outlet outlet) {
-                final double x = solution.si(plant.slotOf(outlet.vapourFraction()));
-                rows.add(new String[] {
-                    connection.from() + " → " + connection.to(),
-                    plant.resolution().modelAt(outlet).name(),
-                    number("%.4f", solution.value(outlet.flow()).si()),
-                    number("%.2f", solution.value(outlet.temperature()).inCelsius()),
-                    number("%.4f", solution.value(outlet.pressure()).inBar()),
-                    number("%.2f", solution.value(outlet.enthalpy()).inKilojoulesPerKilogram()),
-                    number("%.4f", solution.value(outlet.entropy()).inKilojoulesPerKilogramKelvin()),
-                    Double.isNaN(x) ? "" : number("%.4f", x)
-                });
+                table.row(
+                        Cell.of(connection.from() + " → " + connection.to()),
+                        Cell.of(plant.resolution().modelAt(outlet).name()),
+                        Cell.of(solution.value(outlet.flow()).si()),
+                        Cell.of(solution.value(outlet.temperature()).inCelsius()),
+                        Cell.of(solution.value(outlet.pressure()).inBar()),
+                        Cell.of(solution.value(outlet.enthalpy()).inKilojoulesPerKilogram()),
+                        Cell.of(solution.value(outlet.entropy()).inKilojoulesPerKilogramKelvin()),
+                        Cell.of(solution.si(plant.slotOf(outlet.vapourFraction()))));
             }
         }
-        TextTable.append(rows, 2, text);
-        text.append('\n');
+        text.append(table.build()).append('\n');
     }
 
     private static void machines(Solution solution, StringBuilder text) {
-        final List<String[]> rows = new ArrayList<>();
-        rows.add(new String[] {"component", "variable", "value", ""});
+        final Table.Builder table = Table.builder()
+                .words("component")
+                .words("variable")
+                .words("value")
+                .words("");
         for (Component component : solution.plant().components()) {
             for (Port port : component.ports()) {
                 if (port instanceof ShaftPort shaft) {
-                    row(solution, shaft.power(), rows);
+                    row(solution, shaft.power(), table);
                 } else if (port instanceof WirePort wire) {
-                    row(solution, wire.power(), rows);
+                    row(solution, wire.power(), table);
                 } else if (port instanceof HeatPort heat) {
-                    row(solution, heat.rate(), rows);
+                    row(solution, heat.rate(), table);
                 }
             }
-            component.variables().forEach(v -> row(solution, v, rows));
+            component.variables().forEach(v -> row(solution, v, table));
         }
-        TextTable.append(rows, 2, text);
-        text.append('\n');
+        text.append(table.build()).append('\n');
     }
 
-    private static void row(Solution solution, Variable<?> variable, List<String[]> rows) {
+    private static void row(Solution solution, Variable<?> variable, Table.Builder table) {
         if (solution.hasValue(variable)) {
-            rows.add(new String[] {
-                variable.component(),
-                variable.name(),
-                solution.value(variable).toString(),
-                solution.plan().isGiven(solution.plant().slotOf(variable)) ? "given" : ""
-            });
+            table.row(
+                    Cell.of(variable.component()),
+                    Cell.of(variable.name()),
+                    Cell.of(solution.value(variable).toString()),
+                    Cell.of(solution.plan().isGiven(solution.plant().slotOf(variable)) ? "given" : ""));
         }
     }
 
@@ -99,9 +105,5 @@ final class SolutionText {
                 closure.energy(),
                 solution.largestResidual()));
         solution.violations().forEach(v -> text.append("Finding: ").append(v).append('\n'));
-    }
-
-    private static String number(String format, double value) {
-        return String.format(Locale.ROOT, format, value);
     }
 }

@@ -5,4 +5,9 @@ public final class WireInlet extends WirePort {
     WireInlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return true;
+    }
 }

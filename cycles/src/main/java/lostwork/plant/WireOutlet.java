@@ -5,4 +5,9 @@ public final class WireOutlet extends WirePort {
     WireOutlet(String component, String name) {
         super(component, name);
     }
+
+    @Override
+    public boolean isInlet() {
+        return false;
+    }
 }
