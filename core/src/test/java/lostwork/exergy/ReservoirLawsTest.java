@@ -126,6 +126,11 @@ class ReservoirLawsTest {
                 287 * 350 * Math.log(4),
                 FreeEnergy.isothermalShaftWork(before, after).si(),
                 1e-8);
+        // g - f = p v, whatever the datum.
+        assertEquals(
+                287 * 350.0,
+                FreeEnergy.gibbs(before).minus(FreeEnergy.helmholtz(before)).si(),
+                1e-9);
         final var warmer = PerfectGasState.air(351, 1e5);
         assertThrows(IllegalArgumentException.class, () -> FreeEnergy.isothermalWork(before, warmer));
         assertThrows(IllegalArgumentException.class, () -> FreeEnergy.isothermalShaftWork(before, warmer));

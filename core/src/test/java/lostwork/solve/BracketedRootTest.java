@@ -135,6 +135,31 @@ class BracketedRootTest {
         }
     }
 
+    /** The relative accuracy counts from the root, whatever the size of the bounds. */
+    @Test
+    void relativeAccuracyCountsFromTheRoot() {
+        final SplittableRandom random = new SplittableRandom(14);
+        int most = 0;
+        for (int i = 0; i < 2000; i++) {
+            final double root = Math.pow(10, random.nextDouble(-8, 2));
+            final double accuracy = Math.pow(10, random.nextDouble(-12, -1));
+            final double power = random.nextDouble(0.2, 3);
+            final DoubleUnaryOperator f = x -> Math.pow(x, power) - Math.pow(root, power);
+            final FunctionWithSlope withSlope = (x, at) -> at.set(f.applyAsDouble(x), power * Math.pow(x, power - 1));
+            final BracketedRoot rough = BracketedRoot.limitedTo(300).withRelativeAccuracy(accuracy);
+            final double hint = root * random.nextDouble(0.5, 2);
+            final double slack = root * (accuracy * 1.2 + 1e-13);
+            final RootReport report = rough.report("power", f, 1e-9, 1e4);
+            assertEquals(root, report.root(), slack);
+            assertEquals(root, rough.solve("power", f, 1e-9, 1e4, hint), slack);
+            assertEquals(root, rough.solve("power", withSlope, 1e-9, 1e4, hint, new ValueAndSlope()), slack);
+            assertTrue(report.bracketWidth() <= accuracy * report.root() * (1 + 1e-9) + 1e-300, report::toString);
+            most = Math.max(most, report.iterations());
+        }
+        final int worst = most;
+        assertTrue(worst <= 120, () -> "worst " + worst);
+    }
+
     @Test
     void stopsAtTheResidual() {
         final RootReport report = ROOTS.stoppingAtResidual(1e-3).report("cubic", Case.WALLIS.f, 2, 3);

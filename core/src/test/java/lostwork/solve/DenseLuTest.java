@@ -154,6 +154,21 @@ class DenseLuTest {
         }
     }
 
+    /**
+     * A matrix whose inverse {@code I + θC} hides its size from the estimator's first vectors, since {@code Ce = Cᵀe = 0} and
+     * C has an empty first column (after Higham 2002, section 15.4): only the alternating vector finds it.
+     */
+    @Test
+    void conditionEstimateIsNotFooled() {
+        final double theta = 1e6;
+        final double phi = theta / (1 + 2 * theta);
+        final DenseLu lu = DenseLu.ofCapacity(3);
+        lu.factor(new double[] {1, 0, 0, 0, 1 - phi, phi, 0, phi, 1 - phi}, 3);
+        final double exact = 1 / (1 + 2 * theta);
+        final double estimate = lu.reciprocalCondition();
+        assertTrue(estimate >= exact * (1 - 1e-9) && estimate <= 3 * exact, () -> estimate + " against " + exact);
+    }
+
     @Test
     void aSingularMatrixIsReportedAndRefused() {
         final DenseLu lu = DenseLu.ofCapacity(3);

@@ -144,6 +144,12 @@ class SmallSvdTest {
                 }
                 first += ring;
             }
+            for (int j = 0; j < n; j++) {
+                final double scale = random.nextDouble(0.3, 3);
+                for (int i = 0; i < n; i++) {
+                    a[i * n + j] *= scale;
+                }
+            }
             final RankReport plain = SmallSvd.of(a, n, n).rankReport(1e-10);
             final RankReport report = plain.separated();
             assertEquals(3, report.leftNullDimension());
