@@ -16,6 +16,8 @@ final class If97Gibbs {
     private static final int STEPS = 100;
     /** A last step below this is applied to first order; what it leaves out is below the rounding of h and s. */
     private static final double LAST_STEP_K = 1e-5;
+    /** A step below this leads to a last one; backward equations start within 0.025 K. */
+    private static final double CLOSE_STEP_K = 0.05;
 
     private final int region;
     private final double lowestTemperature;
@@ -78,6 +80,19 @@ final class If97Gibbs {
         }
     }
 
+    /** Writes γ, γτ (t) and γττ (tt) into the workspace; all that h, s and cp need. */
+    private void gammaByTau(double temperature, double pressure, Workspace w) {
+        final double tau = referenceTemperature / temperature;
+        final double y = tau + temperatureOffset;
+        residual.evaluateBySecond(pressureScale * pressure + pressureOffset, y, w);
+        final double byY = 1 / y;
+        w.t *= byY;
+        w.tt *= byY * byY;
+        if (ideal != null) {
+            ideal.addTo(pressure / referencePressure, tau, w);
+        }
+    }
+
     private void fill(
             double temperature,
             double pressure,
@@ -128,13 +143,13 @@ final class If97Gibbs {
 
     /** {@return h in J/kg} */
     double enthalpy(double temperature, double pressure, Workspace w) {
-        gamma(temperature, pressure, w);
+        gammaByTau(temperature, pressure, w);
         return gasConstant * referenceTemperature * w.t;
     }
 
     /** {@return s in J/(kg K)} */
     double entropy(double temperature, double pressure, Workspace w) {
-        gamma(temperature, pressure, w);
+        gammaByTau(temperature, pressure, w);
         return gasConstant * (referenceTemperature / temperature * w.t - w.value);
     }
 
@@ -143,13 +158,19 @@ final class If97Gibbs {
         double lowest = lowestTemperature;
         double highest = highestTemperature;
         double t = Math.max(lowest, Math.min(highest, start));
+        boolean close = false;
         for (int k = 0; k < STEPS; k++) {
-            gamma(t, pressure, w);
+            final boolean last = close;
+            if (last) {
+                gamma(t, pressure, w);
+            } else {
+                gammaByTau(t, pressure, w);
+            }
             final double tau = referenceTemperature / t;
             final double miss = enthalpy - gasConstant * referenceTemperature * w.t;
             final double heatCapacity = -gasConstant * tau * tau * w.tt;
             final double step = miss / heatCapacity;
-            if (Math.abs(step) <= LAST_STEP_K) {
+            if (last && Math.abs(step) <= LAST_STEP_K) {
                 final double entropy = gasConstant * (tau * w.t - w.value) + miss / t;
                 fill(t, pressure, step, enthalpy, entropy, w, out);
                 return;
@@ -159,10 +180,12 @@ final class If97Gibbs {
             } else {
                 highest = t;
             }
+            // One more step will do: only now the derivatives by pressure are needed too.
+            close = Math.abs(step) <= CLOSE_STEP_K;
             final double next = t + step;
             t = next > lowest && next < highest ? next : (lowest + highest) / 2;
         }
-        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, h = " + enthalpy + " J/kg", STEPS);
+        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, h = " + enthalpy + " J/kg");
     }
 
     /** Finds the state at a pressure and an entropy; {@code start} is a first guess of the temperature in K. */
@@ -170,13 +193,19 @@ final class If97Gibbs {
         double lowest = lowestTemperature;
         double highest = highestTemperature;
         double t = Math.max(lowest, Math.min(highest, start));
+        boolean close = false;
         for (int k = 0; k < STEPS; k++) {
-            gamma(t, pressure, w);
+            final boolean last = close;
+            if (last) {
+                gamma(t, pressure, w);
+            } else {
+                gammaByTau(t, pressure, w);
+            }
             final double tau = referenceTemperature / t;
             final double miss = entropy - gasConstant * (tau * w.t - w.value);
             final double heatCapacity = -gasConstant * tau * tau * w.tt;
             final double step = miss * t / heatCapacity;
-            if (Math.abs(step) <= LAST_STEP_K) {
+            if (last && Math.abs(step) <= LAST_STEP_K) {
                 final double enthalpy = gasConstant * referenceTemperature * w.t + miss * t;
                 fill(t, pressure, step, enthalpy, entropy, w, out);
                 return;
@@ -186,10 +215,12 @@ final class If97Gibbs {
             } else {
                 highest = t;
             }
+            // One more step will do: only now the derivatives by pressure are needed too.
+            close = Math.abs(step) <= CLOSE_STEP_K;
             final double next = t + step;
             t = next > lowest && next < highest ? next : (lowest + highest) / 2;
         }
-        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, s = " + entropy + " J/(kg K)", STEPS);
+        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, s = " + entropy + " J/(kg K)");
     }
 
     /** The part ln π + Σ n τ<sup>J</sup> with consecutive J. */

@@ -11,7 +11,7 @@ import lostwork.fluid.StatePoint;
  * the determinant holds T (∂p/∂T)²<sub>ρ</sub>/ρ² beside (∂p/∂ρ)<sub>T</sub> cv.
  */
 final class If97Region3 {
-    private static final int STEPS = 60;
+    static final int STEPS = 60;
     /** Newton stops when both relative steps are below this; convergence is quadratic, so the error is below rounding. */
     private static final double LAST_RELATIVE_STEP = 1e-9;
 
@@ -105,8 +105,8 @@ final class If97Region3 {
      * @param dense whether the branch above the critical density is meant
      */
     double density(double temperature, double pressure, boolean dense, double start, Workspace w) {
-        double lowest = dense ? referenceDensity : LOWEST_DENSITY;
-        double highest = dense ? HIGHEST_DENSITY : referenceDensity;
+        double lowest = LOWEST_DENSITY;
+        double highest = HIGHEST_DENSITY;
         double density = Math.max(lowest, Math.min(highest, start));
         final double rt = gasConstant * temperature;
         for (int k = 0; k < STEPS; k++) {
@@ -142,15 +142,10 @@ final class If97Region3 {
         return Double.NaN;
     }
 
-    /** Finds the state at a pressure and an enthalpy from first guesses; false if Newton's method does not arrive. */
+    /** Finds the state at a pressure and an enthalpy from first guesses; false if Newton's method does not arrive. The caller
+     * sets the phase. */
     boolean atPressureEnthalpy(
-            double pressure,
-            double enthalpy,
-            double density,
-            double temperature,
-            Phase phase,
-            Workspace w,
-            StatePoint out) {
+            double pressure, double enthalpy, double density, double temperature, Workspace w, StatePoint out) {
         double d = density;
         double t = temperature;
         for (int k = 0; k < STEPS; k++) {
@@ -169,7 +164,7 @@ final class If97Region3 {
             if (Math.abs(stepT) <= LAST_RELATIVE_STEP * t && Math.abs(stepD) <= LAST_RELATIVE_STEP * d) {
                 // s to first order: T ds = dh - v dp
                 final double entropy = gasConstant * (w.t - w.value) + (missH - missP / d) / t;
-                fill(d + stepD, t + stepT, pressure, enthalpy, entropy, phase, w, out);
+                fill(d + stepD, t + stepT, pressure, enthalpy, entropy, Phase.SUPERCRITICAL, w, out);
                 return true;
             }
             d = limited(d, stepD);
@@ -178,15 +173,10 @@ final class If97Region3 {
         return false;
     }
 
-    /** Finds the state at a pressure and an entropy from first guesses; false if Newton's method does not arrive. */
+    /** Finds the state at a pressure and an entropy from first guesses; false if Newton's method does not arrive. The caller
+     * sets the phase. */
     boolean atPressureEntropy(
-            double pressure,
-            double entropy,
-            double density,
-            double temperature,
-            Phase phase,
-            Workspace w,
-            StatePoint out) {
+            double pressure, double entropy, double density, double temperature, Workspace w, StatePoint out) {
         double d = density;
         double t = temperature;
         for (int k = 0; k < STEPS; k++) {
@@ -203,7 +193,7 @@ final class If97Region3 {
             final double stepD = (cv / t * missP - pt * missS) / determinant;
             if (Math.abs(stepT) <= LAST_RELATIVE_STEP * t && Math.abs(stepD) <= LAST_RELATIVE_STEP * d) {
                 final double enthalpy = rt * (w.t + w.f) + t * missS + missP / d;
-                fill(d + stepD, t + stepT, pressure, enthalpy, entropy, phase, w, out);
+                fill(d + stepD, t + stepT, pressure, enthalpy, entropy, Phase.SUPERCRITICAL, w, out);
                 return true;
             }
             d = limited(d, stepD);

@@ -28,6 +28,7 @@ final class If97Saturation implements SaturationModel {
     private final double n8;
     private final double n9;
     private final double n10;
+    private final double lowestPressure;
 
     If97Saturation(CoefficientTable table) {
         n1 = table.coefficient(0);
@@ -40,11 +41,17 @@ final class If97Saturation implements SaturationModel {
         n8 = table.coefficient(7);
         n9 = table.coefficient(8);
         n10 = table.coefficient(9);
+        lowestPressure = pressure(LOWEST_TEMPERATURE_K);
     }
 
     @Override
     public double lowestTemperature() {
         return LOWEST_TEMPERATURE_K;
+    }
+
+    @Override
+    public double lowestPressure() {
+        return lowestPressure;
     }
 
     @Override
@@ -77,5 +84,19 @@ final class If97Saturation implements SaturationModel {
         final double d = 2 * g / (-f - Math.sqrt(f * f - 4 * e * g));
         final double sum = n10 + d;
         return (sum - Math.sqrt(sum * sum - 4 * (n9 + n10 * d))) / 2;
+    }
+
+    /** {@return dp/dT along the line in Pa/K, from the derivatives of equation 29} @param temperature temperature in K */
+    @Override
+    public double pressureByTemperature(double temperature) {
+        final double distance = temperature - n10;
+        final double theta = temperature + n9 / distance;
+        final double thetaByTemperature = 1 - n9 / (distance * distance);
+        final double beta = Math.sqrt(Math.sqrt(pressure(temperature) / PASCAL_PER_MEGAPASCAL));
+        final double square = beta * beta;
+        final double byTheta =
+                2 * square * theta + n1 * square + 2 * n3 * beta * theta + n4 * beta + 2 * n6 * theta + n7;
+        final double byBeta = 2 * beta * (theta * theta + n1 * theta + n2) + n3 * theta * theta + n4 * theta + n5;
+        return -4 * square * beta * PASCAL_PER_MEGAPASCAL * byTheta * thetaByTemperature / byBeta;
     }
 }

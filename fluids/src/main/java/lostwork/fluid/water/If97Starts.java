@@ -17,7 +17,7 @@ final class If97Starts {
     /** Entropy at the critical point, SR3-03(2014), in J/(kg K). */
     static final double CRITICAL_ENTROPY = 4412.02148223476;
 
-    private static final double GAS_CONSTANT = 461.526;
+    static final double GAS_CONSTANT = 461.526;
 
     private final BackwardEquation t1ph = read("r7-97-table-06-t1-ph");
     private final BackwardEquation t1ps = read("r7-97-table-08-t1-ps");
@@ -111,11 +111,11 @@ final class If97Starts {
         return (dense ? v3aph : v3bph).value(pressure, enthalpy, w);
     }
 
-    double region3TemperatureEntropy(double pressure, double entropy, Workspace w) {
-        return (entropy <= CRITICAL_ENTROPY ? t3aps : t3bps).value(pressure, entropy, w);
+    double region3TemperatureEntropy(double pressure, double entropy, boolean dense, Workspace w) {
+        return (dense ? t3aps : t3bps).value(pressure, entropy, w);
     }
 
-    double region3VolumeEntropy(double pressure, double entropy, Workspace w) {
-        return (entropy <= CRITICAL_ENTROPY ? v3aps : v3bps).value(pressure, entropy, w);
+    double region3VolumeEntropy(double pressure, double entropy, boolean dense, Workspace w) {
+        return (dense ? v3aps : v3bps).value(pressure, entropy, w);
     }
 }

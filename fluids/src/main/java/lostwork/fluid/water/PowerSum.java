@@ -137,6 +137,32 @@ final class PowerSum {
     }
 
     /**
+     * Writes the sum and its logarithmic derivatives by the second argument into the workspace.
+     *
+     * @param x first argument
+     * @param y second argument, not 0
+     * @param space the room of this thread
+     */
+    void evaluateBySecond(double x, double y, Workspace space) {
+        final double[] xs = space.firstPowers;
+        final double[] ys = space.secondPowers;
+        fill(firstProgram, x, xs);
+        fill(secondProgram, y, ys);
+        double value = 0;
+        double t = 0;
+        double tt = 0;
+        for (int k = 0, m = 0; k < coefficients.length; k++, m += 5) {
+            final double term = coefficients[k] * xs[firstSlots[k]] * ys[secondSlots[k]];
+            value += term;
+            t += factors[m + 1] * term;
+            tt += factors[m + 3] * term;
+        }
+        space.value = value;
+        space.t = t;
+        space.tt = tt;
+    }
+
+    /**
      * Writes the sum and its logarithmic derivatives into the workspace.
      *
      * @param x first argument, not 0
