@@ -179,6 +179,28 @@ class SmallSvdTest {
                 }
             }
             assertEquals(n, mixed); // each unknown belongs to one vector
+
+            // Combining the equations at random hides the rings from the rows, but not from the right null vectors.
+            final double[] m = random.doubles((long) n * n, -1, 1).toArray();
+            final double[] combined = new double[n * n];
+            for (int i = 0; i < n; i++) {
+                for (int k = 0; k < n; k++) {
+                    for (int j = 0; j < n; j++) {
+                        combined[i * n + j] += m[i * n + k] * a[k * n + j];
+                    }
+                }
+            }
+            final RankReport dense =
+                    SmallSvd.of(combined, n, n).rankReport(1e-10).separated();
+            assertEquals(3, dense.rightNullDimension());
+            int members = 0;
+            for (int v = 0; v < 3; v++) {
+                final double[] x = dense.rightNullVector(v);
+                for (int j = 0; j < n; j++) {
+                    members += x[j] != 0 ? 1 : 0;
+                }
+            }
+            assertEquals(n, members);
         }
         final RankReport regular =
                 SmallSvd.of(new double[] {1, 0, 0, 1}, 2, 2).rankReport(1e-10).separated();
