@@ -58,13 +58,18 @@ enum FlashProperty {
      * fluid instead of on the value.
      */
     double scale(double asked, StatePoint point) {
-        final double heatCapacity = Double.isInfinite(point.heatCapacity)
-                ? point.pressure * point.volume / point.temperature
-                : point.heatCapacity;
+        final double heatCapacity = naturalHeatCapacity(point);
         return switch (this) {
             case ENTHALPY, INTERNAL_ENERGY -> Math.max(Math.abs(asked), heatCapacity * point.temperature);
             case ENTROPY -> Math.max(Math.abs(asked), heatCapacity);
             case VOLUME -> asked;
         };
+    }
+
+    /** {@return a heat capacity that stays finite at the critical point, where cp does not} */
+    private static double naturalHeatCapacity(StatePoint point) {
+        return point.phase == Phase.TWO_PHASE
+                ? point.pressure * point.volume / point.temperature
+                : point.isochoricHeatCapacity();
     }
 }

@@ -34,12 +34,23 @@ final class PairFlash {
             } else if (inner == Outcome.STUCK) {
                 return Outcome.STUCK;
             } else {
-                // Entropy falls with pressure along both ends of the range of temperatures.
-                more = inner == Outcome.BELOW ? search.nextAbove() : search.nextBelow();
+                more = isReachedAbove(inner, enthalpy, out) ? search.nextAbove() : search.nextBelow();
                 temperature = Double.NaN;
             }
         } while (more);
         return search.outcome;
+    }
+
+    /**
+     * {@return whether a higher pressure has the entropy that lies outside the range of temperatures at this one}
+     *
+     * <p>Along both ends of the range of temperatures entropy falls with pressure, as long as the fluid expands on heating.
+     * In a liquid that contracts on heating the enthalpy tells: it rises with pressure along the isotherm and along the
+     * isentrope, so a state at a lower pressure has less than the end of the range, and one at a higher pressure has more.
+     * The point is at the end of the range that was met.
+     */
+    private static boolean isReachedAbove(Outcome outside, double enthalpy, StatePoint end) {
+        return outside == Outcome.BELOW && (end.volumeByTemperature > 0 || enthalpy > end.enthalpy);
     }
 
     private static double nextLogPressure(StatePoint point, double missing) {

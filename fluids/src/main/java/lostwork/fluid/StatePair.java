@@ -158,7 +158,8 @@ enum StatePair {
 
     static double of(FlashProperty property, StatePoint asked, StatePoint found) {
         final double value = property.of(asked);
-        return Math.abs(property.of(found) - value) / property.scale(value, asked);
+        return Math.abs(property.of(found) - value)
+                / Math.max(property.scale(value, asked), property.scale(value, found));
     }
 
     static double temperature(StatePoint asked, StatePoint found) {

@@ -90,7 +90,8 @@ public abstract class FluidContract {
     }
 
     private double highestSaturation(SaturationModel saturation) {
-        final double pressure = Math.min(fluid().range().highestPressure(), 0.9999 * saturation.criticalPressure());
+        final double pressure =
+                Math.min((1 - 1e-9) * fluid().range().highestPressure(), 0.9999 * saturation.criticalPressure());
         return saturation.temperature(pressure);
     }
 
@@ -124,6 +125,74 @@ public abstract class FluidContract {
                         found.enthalpy,
                         1e-6 * FlashProperty.ENTHALPY.scale(asked.enthalpy, asked),
                         () -> where(pair, asked));
+            }
+        }
+    }
+
+    /** Rounding at a limit is no reason to refuse. */
+    @ParameterizedTest
+    @EnumSource(StatePair.class)
+    void pairsReturnTheCornersOfTheRange(StatePair pair) {
+        final FluidModel model = fluid().model();
+        final FluidRange range = model.range();
+        final StatePoint asked = new StatePoint();
+        final StatePoint found = new StatePoint();
+        for (int corner = 0; corner < 4; corner++) {
+            final double pressure = corner % 2 == 0 ? range.lowestPressure() : range.highestPressure();
+            final double temperature =
+                    corner < 2 ? model.lowestTemperatureAt(pressure) : model.highestTemperatureAt(pressure);
+            model.atTemperaturePressure(temperature, pressure, asked);
+            if (pair.isTestedAt(asked)) {
+                try {
+                    pair.find(model, asked, found);
+                } catch (RuntimeException e) {
+                    throw new AssertionError(where(pair, asked), e);
+                }
+                assertTrue(
+                        pair.deviation(asked, found) <= tolerance().flashes(),
+                        () -> where(pair, asked) + " returned T = " + found.temperature + " K, p = " + found.pressure
+                                + " Pa, off by " + pair.deviation(asked, found));
+            }
+        }
+    }
+
+    /** The saturation line itself, its ends included, from both sides. */
+    @ParameterizedTest
+    @EnumSource(StatePair.class)
+    void pairsReturnTheSaturationLine(StatePair pair) {
+        final FluidModel model = fluid().model();
+        final SaturationModel saturation = model.saturation();
+        if (saturation == null) {
+            return;
+        }
+        final StatePoint asked = new StatePoint();
+        final StatePoint found = new StatePoint();
+        final double low = saturation.lowestTemperature();
+        final double high = highestSaturation(saturation);
+        for (int i = 0; i <= 200; i++) {
+            // half of the places within the last thousandth below the end
+            final double t = i <= 100 ? low + (high - low) * i / 100 : high * (1 - 1e-3 * (i - 100) / 100);
+            for (final PhaseSide side : PhaseSide.values()) {
+                for (final double fraction : new double[] {Double.NaN, 0, 1e-12, 1 - 1e-12, 1}) {
+                    if (Double.isNaN(fraction)) {
+                        model.saturatedAtTemperature(t, side, asked);
+                    } else {
+                        model.atTemperatureVapourFraction(t, fraction, asked);
+                    }
+                    // A temperature and a pressure do not tell liquid from vapour here.
+                    if (!pair.isTestedAt(asked) || pair == StatePair.TEMPERATURE_PRESSURE) {
+                        continue;
+                    }
+                    try {
+                        pair.find(model, asked, found);
+                    } catch (RuntimeException e) {
+                        throw new AssertionError(where(pair, asked), e);
+                    }
+                    assertTrue(
+                            pair.deviation(asked, found) <= tolerance().flashes(),
+                            () -> where(pair, asked) + " returned T = " + found.temperature + " K, p = "
+                                    + found.pressure + " Pa, off by " + pair.deviation(asked, found));
+                }
             }
         }
     }

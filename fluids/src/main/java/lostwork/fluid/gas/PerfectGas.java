@@ -101,6 +101,9 @@ public final class PerfectGas extends Fluid {
         private static final double DATUM_TEMPERATURE_K = 298.15;
         private static final double DATUM_PRESSURE_PA = 1e5;
 
+        /** Relative width within which a computed value over a limit is taken as the limit. */
+        private static final double ROUNDING = 1e-12;
+
         private final String name;
         private final double molarMass;
         private final double gasConstant;
@@ -173,36 +176,35 @@ public final class PerfectGas extends Fluid {
 
         @Override
         public void atPressureEnthalpy(double pressure, double enthalpy, StatePoint out) {
-            atTemperaturePressure(temperatureOfEnthalpy(enthalpy), pressure, out);
+            atRounded(temperatureOfEnthalpy(enthalpy), pressure, out);
         }
 
         @Override
         public void atPressureEntropy(double pressure, double entropy, StatePoint out) {
             final double temperature = DATUM_TEMPERATURE_K
                     * Math.exp((entropy + gasConstant * Math.log(pressure / DATUM_PRESSURE_PA)) / heatCapacity);
-            atTemperaturePressure(temperature, pressure, out);
+            atRounded(temperature, pressure, out);
         }
 
         @Override
         public void atPressureVolume(double pressure, double volume, StatePoint out) {
-            atTemperaturePressure(pressure * volume / gasConstant, pressure, out);
+            atRounded(pressure * volume / gasConstant, pressure, out);
         }
 
         @Override
         public void atTemperatureEntropy(double temperature, double entropy, StatePoint out) {
-            atTemperaturePressure(temperature, pressureOfEntropy(temperature, entropy), out);
+            atRounded(temperature, pressureOfEntropy(temperature, entropy), out);
         }
 
         @Override
         public void atTemperatureVolume(double temperature, double volume, StatePoint out) {
-            atTemperaturePressure(temperature, gasConstant * temperature / volume, out);
+            atRounded(temperature, gasConstant * temperature / volume, out);
         }
 
         @Override
         public void atEnthalpyEntropy(double enthalpy, double entropy, StatePoint out) {
             final double temperature = temperatureOfEnthalpy(enthalpy);
-            range.requireTemperature(temperature);
-            atTemperaturePressure(temperature, pressureOfEntropy(temperature, entropy), out);
+            atRounded(temperature, pressureOfEntropy(temperature, entropy), out);
         }
 
         @Override
@@ -220,6 +222,21 @@ public final class PerfectGas extends Fluid {
             final double temperature =
                     DATUM_TEMPERATURE_K * Math.exp((entropy - gasConstant * expansion) / (heatCapacity - gasConstant));
             atTemperatureVolume(temperature, volume, out);
+        }
+
+        /** Takes a computed temperature or pressure that rounding has carried over a limit as that limit. */
+        private void atRounded(double temperature, double pressure, StatePoint out) {
+            atTemperaturePressure(
+                    rounded(temperature, range.lowestTemperature(), range.highestTemperature()),
+                    rounded(pressure, range.lowestPressure(), range.highestPressure()),
+                    out);
+        }
+
+        private static double rounded(double value, double low, double high) {
+            if (value < low && value >= low * (1 - ROUNDING)) {
+                return low;
+            }
+            return value > high && value <= high * (1 + ROUNDING) ? high : value;
         }
 
         private double temperatureOfEnthalpy(double enthalpy) {
