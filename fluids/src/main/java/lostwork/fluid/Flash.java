@@ -8,6 +8,9 @@ final class Flash {
     /** Relative width of the saturation line for a temperature and a pressure, wider than its own rounding. */
     private static final double LINE_WIDTH = 1e-10;
 
+    /** Relative distance below which a search of a pair ended at a jump rather than at an end of the range. */
+    private static final double SMALL_JUMP = 1e-3;
+
     private Flash() {}
 
     static void temperaturePressure(FluidModel model, double temperature, double pressure, StatePoint out) {
@@ -89,9 +92,13 @@ final class Flash {
     static void enthalpyEntropy(FluidModel model, double enthalpy, double entropy, StatePoint out) {
         requireValue(FlashProperty.ENTHALPY, enthalpy);
         requireValue(FlashProperty.ENTROPY, entropy);
-        if (PairFlash.enthalpyEntropy(model, enthalpy, entropy, out) != Outcome.FOUND) {
+        final Outcome outcome = PairFlash.enthalpyEntropy(model, enthalpy, entropy, out);
+        if (outcome != Outcome.FOUND) {
             throw noPair(
-                    model, FlashProperty.ENTHALPY.with(enthalpy) + " and " + FlashProperty.ENTROPY.with(entropy), out);
+                    model,
+                    FlashProperty.ENTHALPY.with(enthalpy) + " and " + FlashProperty.ENTROPY.with(entropy),
+                    outcome,
+                    out.outerSearch());
         }
     }
 
@@ -107,8 +114,13 @@ final class Flash {
             FluidModel model, FlashProperty property, double asked, double volume, StatePoint out) {
         requireValue(property, asked);
         requireValue(FlashProperty.VOLUME, volume);
-        if (PairFlash.withVolume(model, property, asked, volume, out) != Outcome.FOUND) {
-            throw noPair(model, property.with(asked) + " and " + FlashProperty.VOLUME.with(volume), out);
+        final Outcome outcome = PairFlash.withVolume(model, property, asked, volume, out);
+        if (outcome != Outcome.FOUND) {
+            throw noPair(
+                    model,
+                    property.with(asked) + " and " + FlashProperty.VOLUME.with(volume),
+                    outcome,
+                    out.outerSearch());
         }
     }
 
@@ -262,15 +274,9 @@ final class Flash {
                 "the model jumps there or its derivatives contradict it: check it with FluidCheck");
     }
 
-    private static FlashException noPair(FluidModel model, String search, StatePoint out) {
-        final FluidRange range = model.range();
-        return new FlashException(
-                model.name(),
-                search,
-                out.outerSearch().distance,
-                out.outerSearch().iterations,
-                "the pair lies outside T = " + range.lowestTemperature() + " .. " + range.highestTemperature()
-                        + " K, p = " + range.lowestPressure() + " .. " + range.highestPressure() + " Pa ("
-                        + range.limitedBy() + ")");
+    private static FlashException noPair(FluidModel model, String search, Outcome outcome, BracketedNewton by) {
+        return outcome == Outcome.STUCK && by.distance < SMALL_JUMP
+                ? stuck(model, search, by)
+                : FlashException.outside(model, search, by.distance, by.iterations);
     }
 }

@@ -5,10 +5,10 @@ import java.util.Locale;
 /**
  * Thrown when no state with the two properties asked for is found within the range of a model.
  *
- * <p>Two values that lie outside the range by themselves are refused with
- * {@link lostwork.quantity.OutOfRangeException} instead. This exception means that the search ended: at a discontinuity
- * of the model, or in a model whose derivatives or saturation contradict its properties, which
- * a consistency check finds.
+ * <p>A temperature or a pressure outside the range, or a value that the range does not reach at a given temperature or
+ * pressure, is refused with {@link lostwork.quantity.OutOfRangeException}, which knows the limits. This exception is for
+ * two values such as (h,s) that are possible each by itself but not together, and for a search that ends at a jump of the
+ * model or at derivatives that contradict it; {@link FluidCheck} finds these.
  */
 public final class FlashException extends RuntimeException {
     private static final long serialVersionUID = 1L;
@@ -32,18 +32,44 @@ public final class FlashException extends RuntimeException {
      * @param wayOut what the caller can do, as a clause
      */
     public FlashException(String fluid, String search, double residual, int iterations, String wayOut) {
-        super(String.format(
-                Locale.ROOT,
-                "%s: no state with %s; after %d iterations the relative distance is %.3g; %s",
+        this(
+                String.format(
+                        Locale.ROOT,
+                        "%s: no state with %s; after %d iterations the relative distance is %.3g; %s",
+                        fluid,
+                        search,
+                        iterations,
+                        residual,
+                        wayOut),
                 fluid,
                 search,
-                iterations,
                 residual,
-                wayOut));
+                iterations);
+    }
+
+    private FlashException(String message, String fluid, String search, double residual, int iterations) {
+        super(message);
         this.fluid = fluid;
         this.search = search;
         this.residual = residual;
         this.iterations = iterations;
+    }
+
+    /** {@return the failure of a search that met the ends of the range} */
+    static FlashException outside(FluidModel model, String search, double residual, int iterations) {
+        final FluidRange range = model.range();
+        final String message = String.format(
+                Locale.ROOT,
+                "%s: no state with %s within T = %s .. %s K, p = %s .. %s Pa (%s); %s",
+                model.name(),
+                search,
+                range.lowestTemperature(),
+                range.highestTemperature(),
+                range.lowestPressure(),
+                range.highestPressure(),
+                range.limitedBy(),
+                FluidRange.WAY_OUT);
+        return new FlashException(message, model.name(), search, residual, iterations);
     }
 
     /** {@return the name of the fluid} */

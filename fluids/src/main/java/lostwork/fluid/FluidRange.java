@@ -22,6 +22,29 @@ public record FluidRange(
             "no extrapolation is offered; take a state inside the range or a fluid whose model holds there";
 
     /**
+     * Checks the limits.
+     *
+     * @param lowestTemperature lowest temperature in K
+     * @param highestTemperature highest temperature in K
+     * @param lowestPressure lowest absolute pressure in Pa, above 0
+     * @param highestPressure highest absolute pressure in Pa
+     * @param limitedBy what sets the limits
+     * @throws IllegalArgumentException if a limit is not above 0 and finite, or a lower limit is not below its upper one
+     */
+    public FluidRange {
+        if (!(lowestTemperature > 0
+                && lowestTemperature < highestTemperature
+                && highestTemperature <= Double.MAX_VALUE
+                && lowestPressure > 0
+                && lowestPressure < highestPressure
+                && highestPressure <= Double.MAX_VALUE)) {
+            throw new IllegalArgumentException("range of " + limitedBy + ": T = " + lowestTemperature + " .. "
+                    + highestTemperature + " K, p = " + lowestPressure + " .. " + highestPressure
+                    + " Pa; limits must be above 0 and finite, the lower below the upper");
+        }
+    }
+
+    /**
      * {@return whether a temperature and a pressure lie within the range}
      *
      * @param temperature temperature in K

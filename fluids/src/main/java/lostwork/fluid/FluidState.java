@@ -116,6 +116,40 @@ public final class FluidState implements ThermodynamicState {
         return Speed.metresPerSecond(point.speedOfSound());
     }
 
+    /**
+     * {@return the enthalpy counted from the elements in their standard states at 298.15 K and 1 bar}
+     *
+     * <p>Where streams of different models meet, as water sprayed into flue gas, their own zero points differ; this one is
+     * common to all.
+     *
+     * @throws UndefinedPropertyException if the model has no formation data
+     */
+    public SpecificEnergy enthalpyFromElements() {
+        return SpecificEnergy.joulesPerKilogram(point.enthalpy
+                + requireFormation("enthalpy of formation", fluid.model().enthalpyFromElements()));
+    }
+
+    /**
+     * {@return the absolute entropy, zero in the perfect crystal at 0 K (third law)}
+     *
+     * @throws UndefinedPropertyException if the model has no such data
+     */
+    public SpecificEntropy absoluteEntropy() {
+        return SpecificEntropy.joulesPerKilogramKelvin(point.entropy
+                + requireFormation("absolute entropy", fluid.model().entropyFromAbsoluteZero()));
+    }
+
+    private double requireFormation(String property, double offset) {
+        if (Double.isNaN(offset)) {
+            throw new UndefinedPropertyException(
+                    property,
+                    fluid.name(),
+                    "its model has no formation data",
+                    "take a fluid with formation data where it meets another one or reacts");
+        }
+        return offset;
+    }
+
     /** {@return the phase region} */
     public Phase phase() {
         return point.phase;

@@ -106,7 +106,12 @@ class TwoPhaseExampleTest extends FluidContract {
         final FlashException nowhere = assertThrows(
                 FlashException.class,
                 () -> fluid.state(SpecificEnergy.megajoulesPerKilogram(5), SpecificVolume.cubicMetresPerKilogram(0.1)));
-        assertTrue(nowhere.getMessage().contains("250.0 .. 500.0 K"), nowhere::getMessage);
+        assertTrue(nowhere.getMessage().contains("within T = 250.0 .. 500.0 K"), nowhere::getMessage);
+        assertEquals("example fluid", nowhere.fluid());
+        final UndefinedPropertyException noFormation = assertThrows(
+                UndefinedPropertyException.class,
+                () -> fluid.state(Temperature.kelvin(300), Pressure.bar(2)).enthalpyFromElements());
+        assertTrue(noFormation.getMessage().contains("formation data"), noFormation::getMessage);
     }
 
     @Test
