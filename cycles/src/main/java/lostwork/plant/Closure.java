@@ -14,6 +14,9 @@ public final class Closure {
     /** The share of the largest entropy flow below which a negative entropy generation is rounding. */
     private static final double ROUNDING = 1e-9;
 
+    /** How far below zero a requirement is rounding, in its coherent SI unit. */
+    private static final double REQUIREMENT_ROUNDING = 1e-7;
+
     /** The entropy balance of one component. */
     record EntropyBalance(double generation, double largestFlow) {}
 
@@ -116,11 +119,13 @@ public final class Closure {
                 }
             }
         }
-        for (Equations.Requirement requirement : solution.plant().requirements()) {
-            final double value = solution.evaluate(requirement.notNegative());
-            if (value < -1e-7) {
-                findings.add(requirement.component() + ": " + requirement.words() + " is not met (by " + (float) -value
-                        + ")");
+        final double[] requirements = solution.requirements();
+        for (int i = 0; i < requirements.length; i++) {
+            if (requirements[i] < -REQUIREMENT_ROUNDING) {
+                final Equations.Requirement requirement =
+                        solution.plant().requirements().get(i);
+                findings.add(requirement.component() + ": " + requirement.words() + " is not met (by "
+                        + (float) -requirements[i] + ")");
             }
         }
         return findings;

@@ -1,13 +1,7 @@
 package lostwork.plant;
 
-import java.util.ArrayList;
 import java.util.List;
 import lostwork.fluid.FluidState;
-import lostwork.fluid.Phase;
-import lostwork.fluid.SaturationModel;
-import lostwork.fluid.StatePoint;
-import lostwork.plant.kernel.Tape;
-import lostwork.plant.kernel.Workspace;
 import lostwork.quantity.EntropyRate;
 import lostwork.quantity.Pressure;
 import lostwork.quantity.ScalarQuantity;
@@ -147,100 +141,15 @@ public final class Solution {
     private double[] completed() {
         double[] all = completed;
         if (all == null) {
-            all = complete();
+            all = plan.completion().complete(values);
             completed = all;
         }
         return all;
     }
 
-    private double[] complete() {
-        final Layout layout = plant().layout();
-        final double[] all = new double[layout.slots.size()];
-        for (int slot = 0; slot < all.length; slot++) {
-            all[slot] = plan.isActive(slot) ? values[slot] : Double.NaN;
-        }
-        for (Layout.StreamState state : layout.states) {
-            completeState(state, all);
-        }
-        completeDefinitions(all);
-        return all;
-    }
-
-    private void completeState(Layout.StreamState state, double[] all) {
-        final StatePoint point = new StatePoint();
-        final double p = all[state.slot(SlotRole.PRESSURE)];
-        state.model().atPressureEnthalpy(p, all[state.slot(SlotRole.ENTHALPY)], point);
-        fill(all, state.slot(SlotRole.TEMPERATURE), point.temperature);
-        fill(all, state.slot(SlotRole.ENTROPY), point.entropy);
-        fill(all, state.slot(SlotRole.VOLUME), point.volume);
-        fill(all, state.slot(SlotRole.VAPOUR_FRACTION), point.vapourFraction);
-        final SaturationModel saturation = state.model().saturation();
-        if (saturation != null
-                && p < saturation.criticalPressure()
-                && p >= saturation.pressure(saturation.lowestTemperature())) {
-            final double boiling = saturation.temperature(p);
-            final boolean wet = point.phase == Phase.TWO_PHASE;
-            if (!wet && point.temperature >= boiling) {
-                fill(all, state.slot(SlotRole.SUPERHEAT), point.temperature - boiling);
-            } else if (!wet) {
-                fill(all, state.slot(SlotRole.SUBCOOLING), boiling - point.temperature);
-            }
-        }
-    }
-
-    private static void fill(double[] all, int slot, double value) {
-        if (Double.isNaN(all[slot])) {
-            all[slot] = value;
-        }
-    }
-
-    /** Evaluates the definitions whose variables are all known, until no more are found. */
-    private void completeDefinitions(double[] all) {
-        final List<Variable<?>> open = new ArrayList<>();
-        plant().definitions().forEach((variable, equation) -> {
-            if (Double.isNaN(all[plant().slotOf(variable)])) {
-                open.add(variable);
-            }
-        });
-        boolean found = true;
-        while (found) {
-            found = false;
-            for (Variable<?> variable : List.copyOf(open)) {
-                final Equation definition = plant().definitions().get(variable);
-                final boolean ready = definition.variables().stream()
-                        .allMatch(v -> v.equals(variable) || !Double.isNaN(all[plant().slotOf(v)]));
-                if (ready) {
-                    all[plant().slotOf(variable)] = evaluate(definition, variable, all);
-                    open.remove(variable);
-                    found = true;
-                }
-            }
-        }
-    }
-
-    /** The value of a defined variable: definitions are affine in it. */
-    private double evaluate(Equation definition, Variable<?> variable, double[] all) {
-        final int slot = plant().slotOf(variable);
-        return evaluate(definition.left(), definition.right(), slot, all);
-    }
-
-    private double evaluate(Expression left, Expression right, int slot, double[] all) {
-        final var sites = new lostwork.plant.kernel.CallSites();
-        final Tape.Builder b = new Tape.Builder(sites);
-        final int l = left.emit(b, plant().resolution());
-        final int r = right.emit(b, plant().resolution());
-        final Tape tape = b.build(l, r);
-        final Workspace w = new Workspace(all.length, List.of(tape), sites);
-        for (int k = 0; k < all.length; k++) {
-            w.set(k, Double.isNaN(all[k]) ? 0 : all[k]);
-        }
-        return slot < 0 ? w.leftSide(tape) : w.solveAffine(tape, slot);
-    }
-
-    /** {@return the value of a term in this solution, in coherent SI units} */
-    double evaluate(Expression term) {
-        final double[] all = completed();
-        return evaluate(term, term, -1, all);
+    /** {@return the value of each requirement of the plant, in its order; NaN where it has none} */
+    double[] requirements() {
+        return plan.completion().requirements(completed());
     }
 
     /** {@return the solution as text: states, machines, assumptions and closure} */

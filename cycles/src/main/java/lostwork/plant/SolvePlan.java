@@ -19,7 +19,7 @@ import lostwork.plant.kernel.Workspace;
  * same time. Immutable and thread-safe.
  */
 public final class SolvePlan {
-    private static final int MORE_SEARCHES = 4;
+    private static final int MORE_SEARCHES = 8;
 
     private final Plant plant;
     private final List<Variable<?>> givenVariables;
@@ -31,6 +31,7 @@ public final class SolvePlan {
     private final List<Equation> gaveWay;
     private final List<Equation> redundant;
     private final NeighbourStarts starts;
+    private final Completion completion;
 
     SolvePlan(
             Plant plant,
@@ -52,6 +53,7 @@ public final class SolvePlan {
         this.gaveWay = List.copyOf(gaveWay);
         this.redundant = List.copyOf(redundant);
         starts = new NeighbourStarts(plant, entries, given);
+        completion = new Completion(this);
     }
 
     /** {@return the plant} */
@@ -85,6 +87,10 @@ public final class SolvePlan {
 
     boolean isGiven(int slot) {
         return given[slot];
+    }
+
+    Completion completion() {
+        return completion;
     }
 
     EquationSystem system() {

@@ -559,7 +559,9 @@ public final class BlockSolver {
         if (!lu.isSingular() && lu.reciprocalCondition() > SUSPICIOUS) {
             return;
         }
-        final RankReport rank = SmallSvd.of(Arrays.copyOf(matrix, n * n), n, n).rankReport(SINGULAR);
+        final RankReport rank = SmallSvd.of(Arrays.copyOf(matrix, n * n), n, n)
+                .rankReport(SINGULAR)
+                .separated();
         if (rank.rank() < n) {
             throw singular(number, block, rank.leftNullVector(0), rank.rightNullVector(0));
         }
