@@ -144,7 +144,8 @@ public final class ReferenceEnvironment implements Serializable {
      */
     public ReferenceEnvironment withAtmosphere(AirComposition atmosphere) {
         final double share = atmosphere.fraction(AtmosphericGas.WATER);
-        final Ratio humidity = Ratio.fraction(share * pressure.si() / SaturatedVapour.pressure(temperature.si()));
+        final Ratio humidity = Ratio.fraction(
+                share * pressure.si() / WaterVapourPressure.at(temperature).si());
         return withRelativeHumidity(humidity).withDryAir(atmosphere.dry());
     }
 
@@ -187,7 +188,8 @@ public final class ReferenceEnvironment implements Serializable {
         if (relativeHumidity.si() == 0) {
             return Pressure.pascal(0);
         }
-        final double vapour = relativeHumidity.si() * SaturatedVapour.pressure(temperature.si());
+        final double vapour =
+                relativeHumidity.si() * WaterVapourPressure.at(temperature).si();
         if (!(vapour <= pressure.si())) {
             throw new OutOfRangeException(
                     "partial pressure of water vapour",

@@ -22,6 +22,7 @@
  * <ul>
  *   <li>{@link lostwork.exergy.ReferenceEnvironment}: the environment, and the exergy of flows, closed masses, heat, work,
  *       radiation, motion and height against it; {@link lostwork.exergy.AirComposition} for what it consists of;
+ *   <li>{@link lostwork.exergy.WaterVapourPressure}: the humidity of the environment, and dew points;
  *   <li>{@link lostwork.exergy.TemperatureGlide}: heat at sliding temperature and its Lorenz mean;
  *   <li>{@link lostwork.exergy.Carnot}, {@link lostwork.exergy.Lorenz}, {@link lostwork.exergy.CurzonAhlborn}: efficiencies
  *       and coefficients of performance of engines, refrigerators and heat pumps;

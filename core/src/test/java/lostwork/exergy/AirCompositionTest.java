@@ -9,6 +9,7 @@ import java.io.StringReader;
 import java.util.Map;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Ratio;
+import lostwork.testing.PrintedValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;

@@ -28,6 +28,7 @@ import lostwork.quantity.SpecificVolume;
 import lostwork.quantity.Temperature;
 import lostwork.quantity.Units;
 import lostwork.quantity.Volume;
+import lostwork.testing.PrintedValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;

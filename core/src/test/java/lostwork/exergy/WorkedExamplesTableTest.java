@@ -10,6 +10,7 @@ import static lostwork.quantity.Temperature.kelvin;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import lostwork.quantity.SpecificEnergy;
+import lostwork.testing.PrintedValue;
 import org.junit.jupiter.api.Test;
 
 /**

@@ -2,6 +2,7 @@ package lostwork.fluid.gas;
 
 import java.util.Locale;
 import lostwork.exergy.ReferenceEnvironment;
+import lostwork.exergy.WaterVapourPressure;
 import lostwork.fluid.Provenance;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Pressure;
@@ -76,7 +77,8 @@ public final class HumidAir extends IdealGas {
                     "air without fog",
                     "state it in percent with percent(70), or as a fraction with fraction(0.7)");
         }
-        return ofWaterPressure(relativeHumidity.si() * WaterVapourPressure.pascal(temperature.si()), pressure.si());
+        return ofWaterPressure(
+                relativeHumidity.si() * WaterVapourPressure.at(temperature).si(), pressure.si());
     }
 
     /**
@@ -120,7 +122,7 @@ public final class HumidAir extends IdealGas {
      * @throws OutOfRangeException if water would boil at this temperature and pressure
      */
     public static HumidAir ofDewPoint(Temperature dewPoint, Pressure pressure) {
-        return ofWaterPressure(WaterVapourPressure.pascal(dewPoint.si()), pressure.si());
+        return ofWaterPressure(WaterVapourPressure.at(dewPoint).si(), pressure.si());
     }
 
     /**
@@ -148,7 +150,7 @@ public final class HumidAir extends IdealGas {
                     "liquid water on the bulb, evaporating into the air",
                     "below 0 °C give the relative humidity or the frost point instead");
         }
-        final double saturated = ratioAt(WaterVapourPressure.pascal(wet), pressure.si());
+        final double saturated = ratioAt(WaterVapourPressure.at(wetBulb).si(), pressure.si());
         final double ratio =
                 (airEnthalpy(wet) - airEnthalpy(dry) + saturated * (vapourEnthalpy(wet) - liquidEnthalpy(wet)))
                         / (vapourEnthalpy(dry) - liquidEnthalpy(wet));
@@ -200,7 +202,8 @@ public final class HumidAir extends IdealGas {
      * @throws OutOfRangeException if the temperature is above the critical one of water: there is no saturation
      */
     public Ratio relativeHumidity(Temperature temperature, Pressure pressure) {
-        return Ratio.fraction(waterPressure(pressure.si()) / WaterVapourPressure.pascal(temperature.si()));
+        return Ratio.fraction(waterPressure(pressure.si())
+                / WaterVapourPressure.at(temperature).si());
     }
 
     /**
@@ -212,7 +215,8 @@ public final class HumidAir extends IdealGas {
      */
     public Temperature wetBulb(Temperature temperature, Pressure pressure) {
         final double t = temperature.si();
-        final double relative = waterPressure(pressure.si()) / WaterVapourPressure.pascal(t);
+        final double relative = waterPressure(pressure.si())
+                / WaterVapourPressure.at(temperature).si();
         // A rounding beyond saturation is still saturation.
         if (!(relative <= 1 + 1e-12)) {
             throw new OutOfRangeException(
@@ -241,8 +245,9 @@ public final class HumidAir extends IdealGas {
     }
 
     private static double wetBulbOf(double humidityRatio, double temperature, double pressure) {
-        final double boiling = WaterVapourPressure.temperature(
-                Math.min(pressure, WaterVapourPressure.pascal(WaterVapourPressure.CRITICAL_TEMPERATURE_K)));
+        final double boiling = WaterVapourPressure.dewPoint(Pressure.pascal(Math.min(
+                        pressure, WaterVapourPressure.criticalPressure().si())))
+                .si();
         // Just below boiling the saturated air is all water; the wet bulb stays clear of it.
         final double highest = Math.min(temperature, boiling * (1 - 1e-9));
         if (!(excess(humidityRatio, temperature, pressure, ICE_POINT_K) <= 0)) {
@@ -264,7 +269,8 @@ public final class HumidAir extends IdealGas {
 
     /** {@return how much more enthalpy saturated air at a wet-bulb temperature has than air and the water it takes up} */
     private static double excess(double humidityRatio, double temperature, double pressure, double wet) {
-        final double saturated = ratioAt(WaterVapourPressure.pascal(wet), pressure);
+        final double saturated =
+                ratioAt(WaterVapourPressure.at(Temperature.kelvin(wet)).si(), pressure);
         return airEnthalpy(wet)
                 - airEnthalpy(temperature)
                 + saturated * vapourEnthalpy(wet)

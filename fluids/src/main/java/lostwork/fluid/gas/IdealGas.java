@@ -1,5 +1,6 @@
 package lostwork.fluid.gas;
 
+import lostwork.exergy.WaterVapourPressure;
 import lostwork.fluid.Fluid;
 import lostwork.quantity.MolarEnergy;
 import lostwork.quantity.MolarEntropy;
@@ -164,7 +165,7 @@ public sealed class IdealGas extends Fluid permits DryAir, HumidAir, FlueGas {
      * @throws OutOfRangeException if the gas holds no water, or more than the vapour pressure formula covers
      */
     public final Temperature waterDewPoint(Pressure pressure) {
-        return Temperature.kelvin(WaterVapourPressure.temperature(composition().fraction(Species.H2O) * pressure.si()));
+        return WaterVapourPressure.dewPoint(Pressure.pascal(composition().fraction(Species.H2O) * pressure.si()));
     }
 
     /**

@@ -15,6 +15,7 @@ import java.util.stream.Stream;
 import lostwork.fluid.FluidModel;
 import lostwork.fluid.Phase;
 import lostwork.fluid.StatePoint;
+import lostwork.testing.PrintedValue;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
