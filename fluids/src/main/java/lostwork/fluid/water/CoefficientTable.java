@@ -5,6 +5,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
 import java.io.UncheckedIOException;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -82,19 +83,18 @@ final class CoefficientTable {
             case "argument" -> {
                 require(words.length == 5, "an argument has a quantity, a reference, a factor and an offset");
                 final boolean inverse = words[1].startsWith("1/");
-                final double reference = number(words[2]) * unit(words[1]);
+                final double reference = inSi(words[2], words[1]);
                 final double factor = number(words[3]);
                 arguments.add(new Argument(
                         words[1], inverse ? factor * reference : factor / reference, number(words[4]), reference));
             }
             case "result" -> {
                 require(words.length == 4, "a result has a quantity, a reference and a power");
-                result = new Result(
-                        words[1], number(words[2]) * unit(words[1]), words[3].equals("exp") ? 0 : number(words[3]));
+                result = new Result(words[1], inSi(words[2], words[1]), words[3].equals("exp") ? 0 : number(words[3]));
             }
             case "constant" -> {
                 require(words.length == 3, "a constant has a name and a value");
-                constants.put(words[1], number(words[2]) * unit(words[1]));
+                constants.put(words[1], inSi(words[2], words[1]));
             }
             case "columns" -> columns = words.length - 1;
             default -> {
@@ -121,11 +121,11 @@ final class CoefficientTable {
         return value;
     }
 
-    private static double unit(String quantity) {
-        if (quantity.contains("MPa")) {
-            return 1e6;
-        }
-        return quantity.contains("kJ") ? 1e3 : 1;
+    /** Scaled as a decimal number, so that 16.53 MPa is 16.53e6 Pa without rounding in between. */
+    private static double inSi(String word, String quantity) {
+        number(word);
+        final int power = quantity.contains("MPa") ? 6 : quantity.contains("kJ") ? 3 : 0;
+        return new BigDecimal(word).scaleByPowerOfTen(power).doubleValue();
     }
 
     /** {@return the number of terms} */

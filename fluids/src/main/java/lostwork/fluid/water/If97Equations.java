@@ -89,7 +89,8 @@ final class If97Equations {
             if (Double.isNaN(density)) {
                 throw If97Failure.of(
                         "region 3, " + (dense ? "liquid" : "vapour") + " side",
-                        "T = " + temperature + " K, p = " + pressure + " Pa");
+                        "T = " + temperature + " K, p = " + pressure + " Pa",
+                        w.value);
             }
         }
         region3.evaluate(density, temperature, region3Phase(temperature, pressure, liquid), w, out);
@@ -101,7 +102,7 @@ final class If97Equations {
      *
      * <p>They are the natural pair there, so no search is needed.
      */
-    boolean isRegion3(double temperature, double volume, Workspace w, StatePoint out) {
+    boolean evaluateRegion3(double temperature, double volume, Workspace w, StatePoint out) {
         if (!(temperature > REGION_3_FROM_K && temperature <= REGION_3_TO_K && volume > 0)) {
             return false;
         }
@@ -116,18 +117,59 @@ final class If97Equations {
         final boolean liquid = density > CRITICAL_DENSITY;
         if (temperature < If97Saturation.CRITICAL_TEMPERATURE_K) {
             final double saturationPressure = saturation.pressure(temperature);
-            // Inside the dome the equation gives pressures of no equilibrium, on both sides of the saturation pressure.
-            if (liquid ? pressure < saturationPressure : pressure > saturationPressure) {
-                return false;
-            }
-            final StatePoint side = liquid ? out.liquidSide() : out.vapourSide();
-            region3(temperature, saturationPressure, liquid, w, side);
-            if (liquid ? volume > side.volume : volume < side.volume) {
+            if (isInsideDome(temperature, volume, pressure, saturationPressure, liquid, w, out)) {
                 return false;
             }
         }
         region3.evaluate(density, temperature, region3Phase(temperature, pressure, liquid), w, out);
         out.volume = volume;
+        return true;
+    }
+
+    /** Inside the dome the equation gives pressures of no equilibrium, on both sides of the saturation pressure. */
+    private boolean isInsideDome(
+            double temperature,
+            double volume,
+            double pressure,
+            double saturationPressure,
+            boolean liquid,
+            Workspace w,
+            StatePoint out) {
+        if (liquid ? pressure < saturationPressure : pressure > saturationPressure) {
+            return true;
+        }
+        final StatePoint side = liquid ? out.liquidSide() : out.vapourSide();
+        region3(temperature, saturationPressure, liquid, w, side);
+        return liquid ? volume > side.volume : volume < side.volume;
+    }
+
+    /** {@return whether a point is one phase of region 3} */
+    private boolean isRegion3(StatePoint point) {
+        return point.phase != Phase.TWO_PHASE
+                && point.temperature > REGION_3_FROM_K
+                && point.temperature <= REGION_3_TO_K
+                && point.pressure > boundary23.pressure(point.temperature);
+    }
+
+    /**
+     * {@return whether a point that the equation of region 3 has filled belongs there and is stable; if so, its phase is
+     * set}
+     */
+    boolean acceptRegion3(Workspace w, StatePoint point) {
+        if (!(isRegion3(point) && point.pressure <= HIGHEST_PA)) {
+            return false;
+        }
+        final double t = point.temperature;
+        boolean liquid = 1 / point.volume > CRITICAL_DENSITY;
+        if (t < If97Saturation.CRITICAL_TEMPERATURE_K) {
+            final double saturationPressure = saturation.pressure(t);
+            if (t > INTERPOLATED_FROM_K) {
+                liquid = point.pressure >= saturationPressure;
+            } else if (isInsideDome(t, point.volume, point.pressure, saturationPressure, liquid, w, point)) {
+                return false;
+            }
+        }
+        point.phase = region3Phase(point.temperature, point.pressure, liquid);
         return true;
     }
 

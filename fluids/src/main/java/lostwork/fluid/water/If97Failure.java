@@ -10,11 +10,11 @@ final class If97Failure {
 
     private If97Failure() {}
 
-    static FlashException of(String region, String search) {
+    static FlashException of(String region, String search, double residual) {
         return new FlashException(
                 "water",
                 search + " (" + SOURCE + " " + region + ")",
-                Double.NaN,
+                residual,
                 If97Region3.STEPS,
                 "check the pair, or move away from the critical point");
     }

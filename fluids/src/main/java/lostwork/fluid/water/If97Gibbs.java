@@ -159,6 +159,7 @@ final class If97Gibbs {
         double highest = highestTemperature;
         double t = Math.max(lowest, Math.min(highest, start));
         boolean close = false;
+        double distance = Double.NaN;
         for (int k = 0; k < STEPS; k++) {
             final boolean last = close;
             if (last) {
@@ -182,10 +183,11 @@ final class If97Gibbs {
             }
             // One more step will do: only now the derivatives by pressure are needed too.
             close = Math.abs(step) <= CLOSE_STEP_K;
+            distance = Math.abs(step) / t;
             final double next = t + step;
             t = next > lowest && next < highest ? next : (lowest + highest) / 2;
         }
-        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, h = " + enthalpy + " J/kg");
+        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, h = " + enthalpy + " J/kg", distance);
     }
 
     /** Finds the state at a pressure and an entropy; {@code start} is a first guess of the temperature in K. */
@@ -194,6 +196,7 @@ final class If97Gibbs {
         double highest = highestTemperature;
         double t = Math.max(lowest, Math.min(highest, start));
         boolean close = false;
+        double distance = Double.NaN;
         for (int k = 0; k < STEPS; k++) {
             final boolean last = close;
             if (last) {
@@ -217,10 +220,11 @@ final class If97Gibbs {
             }
             // One more step will do: only now the derivatives by pressure are needed too.
             close = Math.abs(step) <= CLOSE_STEP_K;
+            distance = Math.abs(step) / t;
             final double next = t + step;
             t = next > lowest && next < highest ? next : (lowest + highest) / 2;
         }
-        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, s = " + entropy + " J/(kg K)");
+        throw If97Failure.of("region " + region, "p = " + pressure + " Pa, s = " + entropy + " J/(kg K)", distance);
     }
 
     /** The part ln π + Σ n τ<sup>J</sup> with consecutive J. */

@@ -63,6 +63,9 @@ final class If97Isentrope {
     boolean find(double enthalpy, double entropy, Workspace w, StatePoint out) {
         double pressure = start(enthalpy, entropy, w);
         double best = Double.POSITIVE_INFINITY;
+        if (inRegion3(pressure, enthalpy, entropy, w, out)) {
+            return true;
+        }
         try {
             for (int k = 0; k < STEPS; k++) {
                 if (!(pressure >= If97Equations.LOWEST_PA && pressure <= If97Equations.HIGHEST_PA)) {
@@ -75,12 +78,14 @@ final class If97Isentrope {
                     out.enthalpy = enthalpy;
                     return true;
                 }
+                final double volume = out.volume;
+                final boolean gas = out.phase != Phase.LIQUID && out.phase != Phase.TWO_PHASE;
                 // Quadratic convergence or none: a step between regions sends it to and fro.
                 if (k > 6 && distance >= best) {
                     return false;
                 }
                 best = Math.min(best, distance);
-                pressure = next(pressure, miss, out);
+                pressure = next(pressure, miss, volume, gas);
             }
         } catch (OutOfRangeException e) {
             return false;
@@ -88,13 +93,26 @@ final class If97Isentrope {
         return false;
     }
 
-    private static double next(double pressure, double miss, StatePoint point) {
-        final double linear = miss / (pressure * point.volume);
-        final boolean gas = point.phase != Phase.LIQUID && point.phase != Phase.TWO_PHASE;
+    /** In region 3 density and temperature are searched together, which is regular at the critical point too. */
+    private boolean inRegion3(double pressure, double enthalpy, double entropy, Workspace w, StatePoint out) {
+        if (!(pressure >= equations.region3FromPressure
+                && entropy > REGION_1_HOTTEST_DENSEST
+                && entropy < BORDER_23_LARGEST)) {
+            return false;
+        }
+        final boolean dense = entropy <= If97Starts.CRITICAL_ENTROPY;
+        final double density = 1 / starts.region3VolumeEntropy(pressure, entropy, dense, w);
+        final double temperature = starts.region3TemperatureEntropy(pressure, entropy, dense, w);
+        return equations.region3.atEnthalpyEntropy(enthalpy, entropy, density, temperature, w, out)
+                && equations.acceptRegion3(w, out);
+    }
+
+    private static double next(double pressure, double miss, double volume, boolean gas) {
+        final double linear = miss / (pressure * volume);
         // Along an isentrope of a gas ln p is nearly proportional to ln T, and h to T; for small steps both agree.
         return gas && Math.abs(linear) > 1e-3
                 ? pressure * Math.exp(Math.max(-3, Math.min(3, linear)))
-                : pressure + miss / point.volume;
+                : pressure + miss / volume;
     }
 
     private double start(double enthalpy, double entropy, Workspace w) {

@@ -14,6 +14,16 @@ final class If97Model implements FluidModel {
     /** Width of the saturation line in relative pressure, wider than its rounding; liquid is returned on it. */
     private static final double LINE_WIDTH = 1e-10;
 
+    /**
+     * Liquid water at 298.15 K and 1 bar: enthalpy of formation -285.830 kJ/mol and entropy 69.95 J/(mol K). J. D. Cox,
+     * D. D. Wagman, V. A. Medvedev, CODATA Key Values for Thermodynamics (1989); from memory.
+     */
+    private static final double FORMATION_ENTHALPY = -285.830e3;
+
+    private static final double ABSOLUTE_ENTROPY = 69.95;
+    private static final double STANDARD_K = 298.15;
+    private static final double STANDARD_PA = 1e5;
+
     private final FluidRange range = new FluidRange(
             If97Equations.LOWEST_K,
             If97Equations.HIGHEST_K,
@@ -25,6 +35,26 @@ final class If97Model implements FluidModel {
     private final If97PressureFlash byEnthalpy = new If97PressureFlash.ByEnthalpy(equations, starts);
     private final If97PressureFlash byEntropy = new If97PressureFlash.ByEntropy(equations, starts);
     private final If97Isentrope isentrope = new If97Isentrope(equations, byEntropy);
+
+    private final double enthalpyFromElements;
+    private final double entropyFromAbsoluteZero;
+
+    If97Model() {
+        final StatePoint standard = new StatePoint();
+        equations.evaluate(STANDARD_K, STANDARD_PA, true, Workspace.ofThread(), standard);
+        enthalpyFromElements = FORMATION_ENTHALPY / MOLAR_MASS - standard.enthalpy;
+        entropyFromAbsoluteZero = ABSOLUTE_ENTROPY / MOLAR_MASS - standard.entropy;
+    }
+
+    @Override
+    public double enthalpyFromElements() {
+        return enthalpyFromElements;
+    }
+
+    @Override
+    public double entropyFromAbsoluteZero() {
+        return entropyFromAbsoluteZero;
+    }
 
     @Override
     public String name() {
@@ -121,7 +151,7 @@ final class If97Model implements FluidModel {
 
     @Override
     public void atTemperatureVolume(double temperature, double volume, StatePoint out) {
-        if (!equations.isRegion3(temperature, volume, Workspace.ofThread(), out)) {
+        if (!equations.evaluateRegion3(temperature, volume, Workspace.ofThread(), out)) {
             FluidModel.super.atTemperatureVolume(temperature, volume, out);
         }
     }

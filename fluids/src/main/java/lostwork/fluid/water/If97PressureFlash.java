@@ -151,7 +151,7 @@ abstract class If97PressureFlash {
             }
         }
         if (!inRegion3(pressure, value, dense, w, out)) {
-            throw If97Failure.of("region 3", "p = " + pressure + " Pa, " + words(value));
+            throw If97Failure.of("region 3", "p = " + pressure + " Pa, " + words(value), w.value);
         }
         out.phase = If97Equations.region3Phase(out.temperature, pressure, dense);
     }

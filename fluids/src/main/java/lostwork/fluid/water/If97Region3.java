@@ -97,7 +97,8 @@ final class If97Region3 {
     }
 
     /**
-     * {@return the density in kg/m³ at a temperature and a pressure; NaN if the branch has no such density}
+     * {@return the density in kg/m³ at a temperature and a pressure; NaN if the branch has no such density, with the relative
+     * distance in pressure as the value of the workspace}
      *
      * <p>Newton's method from the dense end on the dense branch, where p(ρ) is convex, and from the dilute end on the
      * other, where it is concave, so that it comes in from one side; a bracket guards it.
@@ -136,7 +137,11 @@ final class If97Region3 {
                 density = (lowest + highest) / 2;
             } else {
                 // Near the critical point p(ρ) is so flat that rounding moves the step; the pressure decides.
-                return Math.abs(miss) <= CLOSED_PRESSURE * pressure ? density : Double.NaN;
+                if (Math.abs(miss) <= CLOSED_PRESSURE * pressure) {
+                    return density;
+                }
+                w.value = Math.abs(miss) / pressure;
+                return Double.NaN;
             }
         }
         return Double.NaN;
@@ -167,6 +172,7 @@ final class If97Region3 {
                 fill(d + stepD, t + stepT, pressure, enthalpy, entropy, Phase.SUPERCRITICAL, w, out);
                 return true;
             }
+            w.value = Math.max(Math.abs(stepT) / t, Math.abs(stepD) / d);
             d = limited(d, stepD);
             t = limited(t, stepT);
         }
@@ -196,6 +202,41 @@ final class If97Region3 {
                 fill(d + stepD, t + stepT, pressure, enthalpy, entropy, Phase.SUPERCRITICAL, w, out);
                 return true;
             }
+            w.value = Math.max(Math.abs(stepT) / t, Math.abs(stepD) / d);
+            d = limited(d, stepD);
+            t = limited(t, stepT);
+        }
+        return false;
+    }
+
+    /**
+     * Finds the state at an enthalpy and an entropy from first guesses; false if Newton's method does not arrive. The
+     * caller sets the phase.
+     */
+    boolean atEnthalpyEntropy(
+            double enthalpy, double entropy, double density, double temperature, Workspace w, StatePoint out) {
+        double d = density;
+        double t = temperature;
+        for (int k = 0; k < STEPS; k++) {
+            phi(d, t, w);
+            final double rt = gasConstant * t;
+            final double missH = enthalpy - rt * (w.t + w.f);
+            final double missS = entropy - gasConstant * (w.t - w.value);
+            final double pd = rt * (2 * w.f + w.ff);
+            final double pt = d * gasConstant * (w.f - w.ft);
+            final double cv = -gasConstant * w.tt;
+            final double hd = (pd - t * pt / d) / d;
+            final double ht = cv + pt / d;
+            final double sd = -pt / (d * d);
+            final double determinant = hd * cv / t - ht * sd;
+            final double stepT = (hd * missS - sd * missH) / determinant;
+            final double stepD = (cv / t * missH - ht * missS) / determinant;
+            if (Math.abs(stepT) <= LAST_RELATIVE_STEP * t && Math.abs(stepD) <= LAST_RELATIVE_STEP * d) {
+                final double pressure = d * rt * w.f + pd * stepD + pt * stepT;
+                fill(d + stepD, t + stepT, pressure, enthalpy, entropy, Phase.SUPERCRITICAL, w, out);
+                return true;
+            }
+            w.value = Math.max(Math.abs(stepT) / t, Math.abs(stepD) / d);
             d = limited(d, stepD);
             t = limited(t, stepT);
         }

@@ -9,11 +9,15 @@ import lostwork.fluid.FluidModel;
  * <pre>{@code
  * Water water = Water.industrial();
  * FluidState live = water.state(celsius(540), bar(120));
- * FluidState feed = water.state(bar(120), kilojoulesPerKilogram(990));
+ * FluidState exhaust = water.state(bar(0.05), live.entropy());
+ * exhaust.vapourFraction();
+ * water.saturation(bar(10)).enthalpyOfEvaporation();
  * }</pre>
  *
  * <p>{@link #industrial()} is the formulation of power plants and of everything that must be fast. The package page tells
- * range, accuracy and sources.
+ * range, accuracy, steps between regions and sources; {@code water.provenance()} prints them.
+ *
+ * <p>Results are engineering estimates. Pressure equipment and steam fall under local codes and licensed practice.
  *
  * <p>Immutable and thread-safe.
  */
