@@ -14,6 +14,7 @@ import lostwork.quantity.Power;
  *
  * <pre>
  * isentropic efficiency  ηₛ (h₂ − h₁) = h(p₂, s₁) − h₁
+ * polytropic efficiency  ηₚ (s₂ − s₁) = (1 − ηₚ) ∫ (v/T) dp
  * power                  P = ṁ (h₂ − h₁)
  * pressure ratio         p₂ / p₁
  * </pre>
@@ -21,7 +22,12 @@ import lostwork.quantity.Power;
  * <p>The power counts positive into the machine. States are static or total ones, as the user reads them; kinetic
  * energy is not added.
  *
- * <p>Source: the definition of the isentropic efficiency, in every textbook of engineering thermodynamics.
+ * <p>The polytropic efficiency is that of every small step of pressure: dh = v dp/ηₚ along the path. With dh = T ds + v dp
+ * the equation above follows; its integral runs along that path. For an ideal gas it is R ln(p₂/p₁), exactly; for other
+ * fluids the path is integrated in ln p. It is computed when it is given or read.
+ *
+ * <p>Source: the definitions of both efficiencies, in every textbook of turbomachinery; for real gases J. M. Schultz, The
+ * polytropic analysis of centrifugal compressors, Trans. ASME J. Eng. Power 84 (1962) 69–82 (from memory).
  */
 public final class Compressor extends FlowMachine {
     private final ShaftInlet shaft = shaftInlet("shaft");
@@ -56,6 +62,11 @@ public final class Compressor extends FlowMachine {
         final Expression idealRise = isentropicOutletEnthalpy().minus(inlet().enthalpy());
         e.sameFlow(inlet(), outlet());
         e.model("isentropic efficiency", isentropicEfficiency().times(rise), idealRise);
+        e.define(
+                "polytropic efficiency",
+                polytropicEfficiency(),
+                polytropicEfficiency().times(entropyRise(e)),
+                Expression.number(1).minus(polytropicEfficiency()).times(polytropicIntegral(e)));
         e.law("power", shaft.power(), inlet().flow().times(rise));
         describeRatios(e, outlet().pressure(), inlet().pressure());
     }

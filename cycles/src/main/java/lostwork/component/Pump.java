@@ -15,6 +15,7 @@ import lostwork.quantity.PressureDifference;
  *
  * <pre>
  * isentropic efficiency  ηₛ (h₂ − h₁) = h(p₂, s₁) − h₁
+ * polytropic efficiency  ηₚ (s₂ − s₁) = (1 − ηₚ) ∫ (v/T) dp
  * power                  P = ṁ (h₂ − h₁)
  * pressure rise          p₂ − p₁
  * pressure ratio         p₂ / p₁
@@ -23,7 +24,12 @@ import lostwork.quantity.PressureDifference;
  * <p>The power counts positive into the machine. The ideal work is that of the real liquid, not v Δp; for cold water
  * the two differ by parts in a thousand.
  *
- * <p>Source: the definition of the isentropic efficiency, in every textbook of engineering thermodynamics.
+ * <p>The polytropic efficiency is that of every small step of pressure: dh = v dp/ηₚ along the path. With dh = T ds + v dp
+ * the equation above follows; its integral runs along that path. For an ideal gas it is R ln(p₂/p₁), exactly; for other
+ * fluids the path is integrated in ln p. It is computed when it is given or read.
+ *
+ * <p>Source: the definitions of both efficiencies, in every textbook of turbomachinery; for real gases J. M. Schultz, The
+ * polytropic analysis of centrifugal compressors, Trans. ASME J. Eng. Power 84 (1962) 69–82 (from memory).
  */
 public final class Pump extends FlowMachine {
     private final ShaftInlet shaft = shaftInlet("shaft");
@@ -64,6 +70,11 @@ public final class Pump extends FlowMachine {
         final Expression idealRise = isentropicOutletEnthalpy().minus(inlet().enthalpy());
         e.sameFlow(inlet(), outlet());
         e.model("isentropic efficiency", isentropicEfficiency().times(rise), idealRise);
+        e.define(
+                "polytropic efficiency",
+                polytropicEfficiency(),
+                polytropicEfficiency().times(entropyRise(e)),
+                Expression.number(1).minus(polytropicEfficiency()).times(polytropicIntegral(e)));
         e.law("power", shaft.power(), inlet().flow().times(rise));
         e.define("pressure rise", pressureRise, outlet().pressure().minus(inlet().pressure()));
         describeRatios(e, outlet().pressure(), inlet().pressure());

@@ -14,6 +14,7 @@ import lostwork.quantity.Power;
  *
  * <pre>
  * isentropic efficiency  h₁ − h₂ = ηₛ (h₁ − h(p₂, s₁))
+ * polytropic efficiency  s₁ − s₂ = (1 − ηₚ) ∫ (v/T) dp
  * power                  P = ṁ (h₁ − h₂)
  * pressure ratio         p₁ / p₂
  * </pre>
@@ -21,7 +22,12 @@ import lostwork.quantity.Power;
  * <p>The power counts positive out of the machine. States are static or total ones, as the user reads them; kinetic
  * energy is not added.
  *
- * <p>Source: the definition of the isentropic efficiency, in every textbook of engineering thermodynamics.
+ * <p>The polytropic efficiency is that of every small step of pressure: dh = ηₚ v dp along the path. With dh = T ds + v dp
+ * the equation above follows; its integral runs along that path. For an ideal gas it is R ln(p₂/p₁), exactly; for other
+ * fluids the path is integrated in ln p. It is computed when it is given or read.
+ *
+ * <p>Source: the definitions of both efficiencies, in every textbook of turbomachinery; for real gases J. M. Schultz, The
+ * polytropic analysis of centrifugal compressors, Trans. ASME J. Eng. Power 84 (1962) 69–82 (from memory).
  */
 public final class Turbine extends FlowMachine {
     private final ShaftOutlet shaft = shaftOutlet("shaft");
@@ -56,6 +62,11 @@ public final class Turbine extends FlowMachine {
         final Expression idealDrop = inlet().enthalpy().minus(isentropicOutletEnthalpy());
         e.sameFlow(inlet(), outlet());
         e.model("isentropic efficiency", drop, isentropicEfficiency().times(idealDrop));
+        e.define(
+                "polytropic efficiency",
+                polytropicEfficiency(),
+                entropyRise(e),
+                polytropicEfficiency().minus(Expression.number(1)).times(polytropicIntegral(e)));
         e.law("power", shaft.power(), inlet().flow().times(drop));
         describeRatios(e, inlet().pressure(), outlet().pressure());
     }
