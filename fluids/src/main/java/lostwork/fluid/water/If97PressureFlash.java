@@ -8,9 +8,10 @@ import lostwork.fluid.StatePoint;
  *
  * <p>Along an isobar the regions follow each other. The property at their borders decides which one a state lies in; the
  * backward equation of the region gives a first guess, and Newton's method on the basic equation makes it exact, so that
- * the property asked for is returned to rounding. At most borders the property makes a small step up or down
- * (R7-97(2012), section 10). A value inside a step up belongs to the lower equation's neighbour: the upper equation is
- * followed a little beyond its border.
+ * the property asked for is returned to rounding. At most borders the property makes a small step (R7-97(2012), section
+ * 10). Inside a step up, a value belongs to no state; at 623.15 K and 1073.15 K the equation above the border, and between
+ * regions 3 and 2 the one below, is then followed a little beyond it. Inside a step down, two states have the value, and
+ * the colder one of regions 1 and 2 or the hotter one of region 2 is returned.
  *
  * <p>{@link Fence} answers most comparisons at once; all of them use β = p<sup>1/4</sup>, in which the curves are smooth.
  */

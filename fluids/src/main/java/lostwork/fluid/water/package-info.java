@@ -34,7 +34,7 @@
  *   <li>Regions meet with small steps: up to 0.018 % in v, 0.13 kJ/kg in h and 0.18 J/(kg K) in s between regions 2 and 3,
  *       0.03 kJ/kg at 623.15 K and 0.1 kJ/kg at 1073.15 K (measured; the release asks for 0.05 %, 0.2 kJ/kg and
  *       0.2 J/(kg K), from memory). A value inside a step belongs to no state; a search by pressure and enthalpy or entropy
- *       then follows the equation of the hotter region a little beyond its border, so that it returns what was asked for.
+ *       then follows one of the two equations a little beyond its border, so that it returns what was asked for.
  *   <li>The saturation equation does not meet the equality of Gibbs energies exactly: its slope and the one of Clausius and
  *       Clapeyron differ by up to 2e-4. Two-phase states carry the slope of the equation.
  *   <li>Cold water contracts on heating below 4 °C. Of the two temperatures that share a pressure and a volume, the warmer

@@ -13,6 +13,7 @@ import lostwork.fluid.Phase;
 import lostwork.fluid.PhaseSide;
 import lostwork.fluid.StatePoint;
 import lostwork.quantity.OutOfRangeException;
+import lostwork.testing.Campaign;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
@@ -20,7 +21,7 @@ import org.junit.jupiter.params.provider.EnumSource;
 /** What holds for water whatever the numbers: searches return what they were asked for, in every region; regions meet. */
 class WaterLawTest {
     private static final long SEED = 19_970_901L;
-    private static final int STATES = 20_000;
+    private static final int STATES = Campaign.cases(20_000);
     private static final FluidModel MODEL = Water.industrial().model();
 
     /** Where random states are drawn. */
@@ -273,7 +274,7 @@ class WaterLawTest {
     /** About the critical point every search ends, with the state asked for or with a typed refusal. */
     @Test
     void nothingHangsAtTheCriticalPoint() {
-        assertTimeoutPreemptively(Duration.ofSeconds(120), () -> {
+        assertTimeoutPreemptively(Duration.ofMillis(6L * STATES), () -> {
             final SplittableRandom random = new SplittableRandom(SEED);
             final StatePoint asked = new StatePoint();
             final StatePoint found = new StatePoint();
