@@ -6,5 +6,6 @@ module lostwork.cycles {
     exports lostwork.component;
     exports lostwork.ledger;
     exports lostwork.plant;
+    exports lostwork.process;
     exports lostwork.report;
 }
