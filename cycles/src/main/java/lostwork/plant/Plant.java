@@ -3,6 +3,7 @@ package lostwork.plant;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -405,11 +406,13 @@ public final class Plant {
                                     + fluid.model().name() + " at " + port);
                 }
             });
+            final Set<Integer> unknown = new HashSet<>();
             for (Port port : ports) {
-                if (port instanceof MaterialPort && !fluids.containsKey(unions.fluidRoot(port))) {
+                if (port instanceof MaterialPort
+                        && !fluids.containsKey(unions.fluidRoot(port))
+                        && unknown.add(unions.fluidRoot(port))) {
                     findings.add("the fluid at " + port + " is not known; start the stream with a Supply, or use "
                             + "circuit(fluid, ...) or medium(port, fluid)");
-                    fluids.put(unions.fluidRoot(port), NO_FLUID);
                 }
             }
             if (!findings.isEmpty()) {
@@ -417,11 +420,5 @@ public final class Plant {
             }
             return fluids;
         }
-
-        /** Stands in for a fluid that is not known, so that each unknown one is reported once. */
-        private static final Fluid NO_FLUID = lostwork.fluid.gas.PerfectGas.of(
-                "unknown",
-                lostwork.quantity.MolarMass.gramsPerMole(1),
-                lostwork.quantity.SpecificHeatCapacity.joulesPerKilogramKelvin(1e5));
     }
 }
