@@ -10,6 +10,7 @@ import lostwork.plant.Plant;
 import lostwork.plant.Solution;
 import lostwork.quantity.Power;
 import lostwork.quantity.Ratio;
+import lostwork.testing.PrintedValue;
 import org.junit.jupiter.api.Test;
 
 /**

@@ -12,6 +12,7 @@ import lostwork.plant.Plant;
 import lostwork.plant.Solution;
 import lostwork.plant.Variable;
 import lostwork.quantity.Power;
+import lostwork.testing.PrintedValue;
 import org.junit.jupiter.api.Test;
 
 /**

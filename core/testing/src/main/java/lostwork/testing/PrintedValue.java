@@ -48,7 +48,19 @@ public final class PrintedValue {
      * @param where table, row and column, for the failure message
      */
     public void assertMatches(double actual, String where) {
-        assertEquals(value(), actual, halfUnit() + ARITHMETIC * Math.abs(value()), where);
+        assertMatches(actual, 0, where);
+    }
+
+    /**
+     * Fails unless a value would be printed the same way but for a difference that the data of the source explain, such as
+     * another formulation of the properties; the test says which.
+     *
+     * @param actual value in the unit of the source
+     * @param dataDifference largest difference that is explained, in the unit of the source
+     * @param where table, row and column, for the failure message
+     */
+    public void assertMatches(double actual, double dataDifference, String where) {
+        assertEquals(value(), actual, halfUnit() + dataDifference + ARITHMETIC * Math.abs(value()), where);
     }
 
     /** {@return the digits} */
