@@ -22,6 +22,8 @@ import java.util.Arrays;
 public final class SmallSvd {
     private static final int SWEEPS = 60;
     private static final double ORTHOGONAL = 1e-15;
+    /** Square of a norm that counts as zero against entries of size 1; a smaller one would underflow. */
+    private static final double ZERO = 1e-280;
 
     private final int rows;
     private final int columns;
@@ -119,7 +121,7 @@ public final class SmallSvd {
                         gamma += x * y;
                     }
                     final double cosine = Math.abs(gamma) / (Math.sqrt(alpha) * Math.sqrt(beta));
-                    if (!(cosine > ORTHOGONAL)) { // also a column of zeros
+                    if (!(cosine > ORTHOGONAL) || Math.min(alpha, beta) < ZERO) { // also a column of zeros
                         continue;
                     }
                     worst = Math.max(worst, cosine);

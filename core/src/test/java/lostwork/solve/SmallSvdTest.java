@@ -41,6 +41,20 @@ class SmallSvdTest {
         assertEquals(3, svd.rank(1e-2) + 1);
     }
 
+    /** Three columns in a plane: the third shrinks until it underflows, and then is zero, not a direction. */
+    @Test
+    void dependentColumnsThatUnderflow() {
+        final RankReport report = SmallSvd.of(
+                        new double[] {
+                            0.07350365519970428, 0.9656885338596571, 0, 0, 1, -0.03919218905936153, 0, 0, 0,
+                        },
+                        3,
+                        3)
+                .rankReport(1e-9);
+        assertEquals(2, report.rank());
+        assertEquals(1, Math.abs(report.leftNullVector(0)[2]), 1e-12);
+    }
+
     /** A circulant difference matrix: every row and column sums to zero, so both null vectors are constant. */
     @Test
     void aRingOfBalancesHasConstantNullVectors() {

@@ -3,6 +3,7 @@ package lostwork.component;
 import java.util.List;
 import lostwork.plant.Component;
 import lostwork.plant.Equations;
+import lostwork.plant.ExergyPurpose;
 import lostwork.plant.Expression;
 import lostwork.plant.FlowPath;
 import lostwork.plant.FluidFunctionFactory;
@@ -18,25 +19,29 @@ import lostwork.quantity.TemperatureSpan;
 
 /** Two streams that exchange heat through a wall. */
 public final class HeatExchanger extends Component {
+    static final TemperatureSpan NO_DIFFERENCE = TemperatureSpan.kelvins(0);
+    static final TemperatureSpan LARGEST_DIFFERENCE = TemperatureSpan.kelvins(10_000);
+
     private final FlowArrangement arrangement;
     private final Inlet hotInlet = inlet("hot inlet");
     private final Outlet hotOutlet = outlet("hot outlet");
     private final Inlet coldInlet = inlet("cold inlet");
     private final Outlet coldOutlet = outlet("cold outlet");
-    private final FlowPath hotSide = new Side(hotInlet, hotOutlet);
-    private final FlowPath coldSide = new Side(coldInlet, coldOutlet);
+    private final FlowPath hotSide = new Way(hotInlet, hotOutlet);
+    private final FlowPath coldSide = new Way(coldInlet, coldOutlet);
     private final Variable<Power> duty = variable("duty", Power.KIND);
-    private final Variable<TemperatureSpan> warmEndDifference = variable("warm end difference", TemperatureSpan.KIND);
-    private final Variable<TemperatureSpan> coldEndDifference = variable("cold end difference", TemperatureSpan.KIND);
-    private final Variable<TemperatureSpan> pinch = variable("pinch", TemperatureSpan.KIND);
-    private final Variable<TemperatureSpan> meanDifference = variable("mean difference", TemperatureSpan.KIND);
+    private final Variable<TemperatureSpan> warmEndDifference =
+            variable("warm end difference", NO_DIFFERENCE, LARGEST_DIFFERENCE);
+    private final Variable<TemperatureSpan> coldEndDifference =
+            variable("cold end difference", NO_DIFFERENCE, LARGEST_DIFFERENCE);
+    private final Variable<TemperatureSpan> pinch = variable("pinch", NO_DIFFERENCE, LARGEST_DIFFERENCE);
+    private final Variable<TemperatureSpan> meanDifference =
+            variable("mean difference", NO_DIFFERENCE, LARGEST_DIFFERENCE);
     private final Variable<Conductance> conductance = variable("conductance", Conductance.KIND);
-    private final Variable<Ratio> effectiveness = variable("effectiveness", Ratio.KIND);
+    private final Variable<Ratio> effectiveness = variable("effectiveness", Ratio.percent(0), Ratio.percent(100));
     private final Variable<PressureDifference> hotPressureLoss = variable("hot pressure loss", PressureDifference.KIND);
     private final Variable<PressureDifference> coldPressureLoss =
             variable("cold pressure loss", PressureDifference.KIND);
-
-    private record Side(Inlet inlet, Outlet outlet) implements FlowPath {}
 
     /**
      * Creates an exchanger in counterflow.
@@ -138,6 +143,12 @@ public final class HeatExchanger extends Component {
         return coldPressureLoss;
     }
 
+    /** {@return the exergy that the hot stream gives up as fuel, the rise of exergy of the cold stream as product} */
+    @Override
+    public ExergyPurpose purpose() {
+        return ExergyPurpose.dissipative().withFuelDrop(hotInlet, hotOutlet).withProductRise(coldInlet, coldOutlet);
+    }
+
     @Override
     protected void describe(Equations e) {
         e.sameFlow(hotInlet, hotOutlet);
@@ -146,10 +157,10 @@ public final class HeatExchanger extends Component {
         final Expression coldRise = coldOutlet.enthalpy().minus(coldInlet.enthalpy());
         e.law("energy balance of the hot side", duty, hotInlet.flow().times(hotFall));
         e.law("energy balance of the cold side", duty, coldInlet.flow().times(coldRise));
-        e.law("hot pressure loss", hotPressureLoss, hotInlet.pressure().minus(hotOutlet.pressure()));
-        e.law("cold pressure loss", coldPressureLoss, coldInlet.pressure().minus(coldOutlet.pressure()));
-        e.assume("no pressure loss of the hot stream", hotPressureLoss, PressureDifference.pascals(0));
-        e.assume("no pressure loss of the cold stream", coldPressureLoss, PressureDifference.pascals(0));
+        e.define("hot pressure loss", hotPressureLoss, hotInlet.pressure().minus(hotOutlet.pressure()));
+        e.define("cold pressure loss", coldPressureLoss, coldInlet.pressure().minus(coldOutlet.pressure()));
+        e.assume("no pressure loss of the hot stream", hotInlet.pressure(), hotOutlet.pressure());
+        e.assume("no pressure loss of the cold stream", coldInlet.pressure(), coldOutlet.pressure());
 
         final boolean counterflow = arrangement == FlowArrangement.COUNTERFLOW;
         final Expression warmEnd = hotInlet.temperature().minus((counterflow ? coldOutlet : coldInlet).temperature());
