@@ -17,7 +17,70 @@ import lostwork.quantity.PressureDifference;
 import lostwork.quantity.Ratio;
 import lostwork.quantity.TemperatureSpan;
 
-/** Two streams that exchange heat through a wall. */
+/**
+ * Two streams that exchange heat through a wall: recuperator, economiser, boiler, feedwater heater, condenser with a
+ * coolant of its own.
+ *
+ * <p>What is known of an exchanger differs from task to task: a pinch in a design, temperatures in a test, the conductance
+ * UA when one that stands is run otherwise. Each is a variable here, and any of them may be given in place of another. A
+ * boiler with economiser, evaporator and superheater is one exchanger: the places where the water begins and ends to
+ * boil are found inside.
+ *
+ * <h2>Equations</h2>
+ *
+ * <p>Along the exchanger the share z of the duty runs from 0 at the warm end, where the hot stream enters, to 1 at the cold
+ * end, where it leaves. Enthalpy and pressure of each stream run linearly in z between its two ends, temperatures follow
+ * from the fluids, and ΔT(z) is the temperature of the hot stream less that of the cold one.
+ *
+ * <pre>
+ * energy balances       Q = m_hot (h_hot,in − h_hot,out) = m_cold (h_cold,out − h_cold,in)
+ * warm end difference   ΔT(0)
+ * cold end difference   ΔT(1)
+ * pinch                 min ΔT(z)                                                  Linnhoff [1]
+ * mean difference       1/Δm = ∫ dz / ΔT(z)
+ * conductance           UA = Q / Δm = ∫ dQ / ΔT
+ * effectiveness         ε = the larger of
+ *                           (h_hot,in − h_hot,out) / (h_hot,in − h_hot(p_hot,out, T_cold,in))
+ *                           (h_cold,out − h_cold,in) / (h_cold(p_cold,out, T_hot,in) − h_cold,in)
+ * pressure losses       p_hot,in − p_hot,out,   p_cold,in − p_cold,out
+ * </pre>
+ *
+ * <p>Units are SI; Q, the differences and UA count positive when heat passes from the hot to the cold stream. Only energy
+ * balances hold flows: a pinch or an effectiveness says the same of a small exchanger and of a large one.
+ *
+ * <ul>
+ *   <li>The pinch is the exact minimum: over both ends, over the kinks where a stream begins or ends to boil or condense, and
+ *       over smooth minima between. It is not smoothed. Where the place of the minimum jumps, its derivative does too.
+ *   <li>UA takes the heat transfer coefficient as the same everywhere. With constant heat capacities Δm is the logarithmic mean
+ *       of the differences at the ends, and ε is that of the tables of Kays and London [2] and of Incropera and DeWitt [3].
+ *   <li>ε compares with the duty at which one stream would leave at the temperature at which the other enters, also where a
+ *       pinch inside forbids it: a boiler has its closest approach inside, and an effectiveness below 1 there.
+ *       In parallel flow ε stays below 1 too.
+ *   <li>A stream that stays two-phase up to an end holds that end's temperature whatever its enthalpy; differences there
+ *       then do not determine the duty, and the solve says so.
+ *   <li>Two of these values may be met by two exchangers (a pinch and a mean difference, for one); the one found is a
+ *       solution, and a further given value chooses.
+ * </ul>
+ *
+ * <p>Assumed: no heat loss to the surroundings, and no pressure loss of either stream unless one is given. A solution in
+ * which the streams cross is an error that names the exchanger and the end, or says that it happens between the ends.
+ * A conductance so large that the closest approach falls below 1e-12 K, from some 33 transfer units (1 − C) on, cannot be
+ * resolved and is refused; give a difference or the effectiveness instead.
+ *
+ * <p>In exergy the hot stream spends and the cold one gains, as above the temperature of the surroundings.
+ *
+ * <pre>{@code
+ * var boiler = b.add(new HeatExchanger("boiler"));
+ * b.line(gas, boiler.hotSide(), stack);
+ * ...
+ * .given(boiler.pinch(), kelvins(12)).given(boiler.coldOutlet().superheat(), kelvins(60))     // design: the flow comes out
+ * .given(boiler.conductance(), kilowattsPerKelvin(310))                                     // the same boiler, run otherwise
+ * }</pre>
+ *
+ * <p>[1] B. Linnhoff, E. Hindmarsh, The pinch design method for heat exchanger networks, Chem. Eng. Sci. 38 (1983) 745–763.
+ * [2] W. M. Kays, A. L. London, Compact Heat Exchangers, McGraw-Hill, chapter 2. [3] F. P. Incropera, D. P. DeWitt,
+ * Fundamentals of Heat and Mass Transfer, Wiley, chapter on heat exchangers.
+ */
 public final class HeatExchanger extends Component {
     static final TemperatureSpan NO_DIFFERENCE = TemperatureSpan.kelvins(0);
     static final TemperatureSpan LARGEST_DIFFERENCE = TemperatureSpan.kelvins(10_000);
@@ -113,7 +176,7 @@ public final class HeatExchanger extends Component {
         return coldEndDifference;
     }
 
-    /** {@return the smallest temperature difference between the streams, anywhere along the exchanger} */
+    /** {@return the smallest temperature difference between the streams, anywhere along the exchanger, 0 K or more} */
     public Variable<TemperatureSpan> pinch() {
         return pinch;
     }
@@ -128,7 +191,7 @@ public final class HeatExchanger extends Component {
         return conductance;
     }
 
-    /** {@return the duty over the largest one that the inlet temperatures allow} */
+    /** {@return the duty over the one at which a stream would reach the inlet temperature of the other; 0 to 100 %} */
     public Variable<Ratio> effectiveness() {
         return effectiveness;
     }
