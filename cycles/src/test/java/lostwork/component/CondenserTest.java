@@ -57,7 +57,7 @@ class CondenserTest {
     @Test
     void pressureFollowsFromTheCoolant() {
         final Solution byPressure = machines()
-                .given(boiler.hotOutlet().temperature(), celsius(180))
+                .given(boiler.hotOutlet().temperature(), celsius(170))
                 .given(condenser.pressure(), bar(0.10))
                 .solve();
         assertEquals(12, byPressure.value(boiler.pinch()).inKelvins(), 1e-8);
@@ -65,7 +65,7 @@ class CondenserTest {
         final double boiling =
                 Water.industrial().saturation(bar(0.10)).temperature().inCelsius();
         final Solution byCoolant = machines()
-                .given(boiler.hotOutlet().temperature(), celsius(180))
+                .given(boiler.hotOutlet().temperature(), celsius(170))
                 .given(condenser.heat().temperature(), celsius(boiling - 20))
                 .given(condenser.temperatureDifference(), kelvins(20))
                 .solve();
@@ -79,18 +79,18 @@ class CondenserTest {
     @Test
     void stackTemperatureAndSuperheatChangePlaces() {
         final Solution first = machines()
-                .given(boiler.hotOutlet().temperature(), celsius(180))
+                .given(boiler.hotOutlet().temperature(), celsius(170))
                 .given(condenser.pressure(), bar(0.10))
                 .solve();
         final Solution second = machines()
                 .given(turbine.inlet().superheat(), first.value(turbine.inlet().superheat()))
                 .given(condenser.pressure(), bar(0.10))
                 .solve();
-        assertEquals(180, second.value(boiler.hotOutlet().temperature()).inCelsius(), 1e-6);
+        assertEquals(170, second.value(boiler.hotOutlet().temperature()).inCelsius(), 1e-6);
         final Solution third = machines()
                 .release(boiler.pinch())
                 .given(boiler.conductance(), first.value(boiler.conductance()))
-                .given(boiler.hotOutlet().temperature(), celsius(180))
+                .given(boiler.hotOutlet().temperature(), celsius(170))
                 .given(condenser.pressure(), bar(0.10))
                 .solve();
         assertEquals(12, third.value(boiler.pinch()).inKelvins(), 1e-6);
@@ -99,7 +99,7 @@ class CondenserTest {
     @Test
     void aCoolantWarmerThanTheCondensateIsRefused() {
         final Specification s = machines()
-                .given(boiler.hotOutlet().temperature(), celsius(180))
+                .given(boiler.hotOutlet().temperature(), celsius(170))
                 .given(condenser.pressure(), bar(0.10))
                 .given(condenser.heat().temperature(), celsius(60));
         final var e = assertThrows(PlantSolveException.class, s::solve);
