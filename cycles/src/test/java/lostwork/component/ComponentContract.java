@@ -5,15 +5,21 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.SplittableRandom;
 import lostwork.plant.Component;
+import lostwork.plant.HeatPort;
 import lostwork.plant.MaterialPort;
 import lostwork.plant.Port;
+import lostwork.plant.ShaftPort;
 import lostwork.plant.Solution;
+import lostwork.plant.SolveOptions;
 import lostwork.plant.Specification;
 import lostwork.plant.Variable;
+import lostwork.plant.WirePort;
 import lostwork.quantity.ScalarQuantity;
+import lostwork.testing.Campaign;
 import org.junit.jupiter.api.Test;
 
 /**
@@ -51,7 +57,7 @@ abstract class ComponentContract {
     @Test
     final void balancesCloseAndNoEntropyIsDestroyed() {
         final SplittableRandom random = new SplittableRandom(20_261_201L);
-        for (int i = 0; i < CASES; i++) {
+        for (int i = 0; i < Campaign.cases(CASES); i++) {
             final Case c = draw(random);
             final Solution s = c.specification().solve();
             assertEquals(0, s.closure().mass(), 1e-12, () -> "mass\n" + s);
@@ -112,15 +118,15 @@ abstract class ComponentContract {
 
     /** The variables of the component that have a value, and the core ones of its ports. */
     private static List<Variable<?>> results(Component component, Solution s) {
-        final List<Variable<?>> found = new java.util.ArrayList<>(component.variables());
+        final List<Variable<?>> found = new ArrayList<>(component.variables());
         for (Port port : component.ports()) {
             if (port instanceof MaterialPort m) {
                 found.addAll(List.of(m.flow(), m.pressure(), m.enthalpy()));
-            } else if (port instanceof lostwork.plant.ShaftPort shaft) {
+            } else if (port instanceof ShaftPort shaft) {
                 found.add(shaft.power());
-            } else if (port instanceof lostwork.plant.WirePort wire) {
+            } else if (port instanceof WirePort wire) {
                 found.add(wire.power());
-            } else if (port instanceof lostwork.plant.HeatPort heat) {
+            } else if (port instanceof HeatPort heat) {
                 found.add(heat.rate());
             }
         }
@@ -137,11 +143,16 @@ abstract class ComponentContract {
         return specification.with(variable, variable.kind().ofSi(si));
     }
 
-    /** A result taken as given, and a given value left free in its place: the same point comes out. */
+    /**
+     * A result taken as given, and a given value left free in its place: the same point comes out. Where the equations have
+     * a second root, such as two flows with one mean temperature difference, a cold solve may find that one; a solve that
+     * starts from the point must stay there.
+     */
     @Test
     final void resultsAndGivenValuesExchange() {
         final SplittableRandom random = new SplittableRandom(2_718L);
         int exchanged = 0;
+        int others = 0;
         for (int i = 0; i < 6; i++) {
             final Case c = drawSmooth(random);
             final Solution s = c.specification().solve();
@@ -156,20 +167,30 @@ abstract class ComponentContract {
                                     Math.abs(s.value(result).si()),
                                     1e-3 * result.kind().naturalScale());
                     if (share > 0.1) {
-                        final Solution back =
-                                exchange(c.specification(), s, given, result).solve();
-                        final double expected = s.value(given).si();
-                        assertEquals(
-                                expected,
-                                back.value(given).si(),
-                                1e-7 * Math.abs(expected) / Math.min(1, share),
-                                given + " from " + result);
+                        final Specification back = exchange(c.specification(), s, given, result);
+                        final double room = 1e-7 * Math.abs(s.value(given).si()) / Math.min(1, share);
+                        if (!isNear(s, back.solve(), given, room)) {
+                            others++;
+                            final Solution warm =
+                                    back.solve(SolveOptions.defaults().startingFrom(s));
+                            assertTrue(isNear(s, warm, given, room), given + " from " + result);
+                        }
                         exchanged++;
                     }
                 }
             }
         }
+        assertTrue(others <= largestShareOfOtherRoots() * exchanged, others + " other roots of " + exchanged);
         exchanges(exchanged);
+    }
+
+    private static boolean isNear(Solution expected, Solution actual, Variable<?> variable, double room) {
+        return Math.abs(actual.value(variable).si() - expected.value(variable).si()) <= room;
+    }
+
+    /** How often a cold solve may find another root that the equations have. */
+    double largestShareOfOtherRoots() {
+        return 0.1;
     }
 
     /** Looks at how many exchanges were made; a component without variables of its own has none. */
@@ -185,7 +206,7 @@ abstract class ComponentContract {
     @Test
     final void namesArePlainAndDifferent() {
         final Case c = draw(new SplittableRandom(1));
-        final List<String> names = new java.util.ArrayList<>();
+        final List<String> names = new ArrayList<>();
         c.component().variables().forEach(v -> names.add(v.name()));
         c.component().ports().forEach(p -> names.add(p.name()));
         for (String name : names) {

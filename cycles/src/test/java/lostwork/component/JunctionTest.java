@@ -10,6 +10,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import lostwork.plant.Plant;
 import lostwork.plant.PlantSolveException;
+import lostwork.quantity.PressureDifference;
 import org.junit.jupiter.api.Test;
 
 /** Mixer and splitter, worked by hand with a perfect gas. */
@@ -98,5 +99,35 @@ class JunctionTest {
                 "s has no outlet 3; it has 2, counted from 1",
                 assertThrows(IllegalArgumentException.class, () -> new Splitter("s").outlet(3))
                         .getMessage());
+    }
+
+    /** Two coolers in parallel: a balancing valve in one branch takes up the loss of the other. */
+    @Test
+    void parallelBranchesMeetAgainBehindABalancingValve() {
+        final var b = Plant.builder("parallel coolers");
+        final var in = b.add(new Supply("in", TestGas.COLD_AIR));
+        final var splitter = b.add(new Splitter("splitter"));
+        final var first = b.add(new Cooler("cooler 1"));
+        final var second = b.add(new Cooler("cooler 2"));
+        final var valve = b.add(new Valve("balancing valve"));
+        final var mixer = b.add(new Mixer("mixer"));
+        final var out = b.add(new Discharge("out"));
+        b.connect(in.outlet(), splitter.inlet());
+        b.line(splitter.path(1), first, valve, mixer.path(1));
+        b.line(splitter.path(2), second, mixer.path(2));
+        b.connect(mixer.outlet(), out.inlet());
+        final var s = b.build()
+                .specify()
+                .given(in.pressure(), bar(5))
+                .given(in.temperature(), celsius(200))
+                .given(in.flow(), kilogramsPerSecond(4))
+                .given(splitter.fraction(1), percent(25))
+                .given(first.outlet().temperature(), celsius(40))
+                .given(second.outlet().temperature(), celsius(80))
+                .given(second.pressureLoss(), PressureDifference.bars(0.2))
+                .solve();
+        assertEquals(70, s.value(out.temperature()).inCelsius(), 1e-9);
+        assertEquals(4.8, s.value(out.pressure()).inBar(), 1e-9);
+        assertEquals(0.2e5, s.value(valve.pressureLoss()).inPascals(), 1e-4);
     }
 }

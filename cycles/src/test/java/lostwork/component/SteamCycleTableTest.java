@@ -12,7 +12,6 @@ import lostwork.plant.Plant;
 import lostwork.plant.Solution;
 import lostwork.plant.Variable;
 import lostwork.quantity.Power;
-import lostwork.testing.PrintedValue;
 import org.junit.jupiter.api.Test;
 
 /**
@@ -57,21 +56,20 @@ class SteamCycleTableTest {
                 .given(c.net(), Power.megawatts(100))
                 .solve();
         final double heat = s.value(c.boiler().duty()).inMegawatts();
-        PrintedValue.of("37.1").assertMatches(100 * 100 / heat, "thermal efficiency in %");
-        PrintedValue.of("0.84")
+        BookValue.of("37.1").assertMatches(100 * 100 / heat, "thermal efficiency in %");
+        BookValue.of("0.84")
                 .assertMatches(
                         100
                                 * s.value(c.pump().power()).inWatts()
                                 / s.value(c.turbine().power()).inWatts(),
                         "back work ratio in %");
-        PrintedValue.of("269.77").assertMatches(heat, 0.10, "heat input in MW");
-        PrintedValue.of("169.75")
-                .assertMatches(s.value(c.condenser().duty()).inMegawatts(), 0.10, "heat rejected in MW");
-        PrintedValue.of("3.77e5")
+        BookValue.of("269.77").assertMatches(heat, 0.10, "heat input in MW");
+        BookValue.of("169.75").assertMatches(s.value(c.condenser().duty()).inMegawatts(), 0.10, "heat rejected in MW");
+        BookValue.of("3.77e5")
                 .assertMatches(s.value(c.boiler().inlet().flow()).inKilogramsPerSecond() * 3600, "steam flow in kg/h");
-        PrintedValue.of("0.6745")
+        BookValue.of("0.6745")
                 .assertMatches(s.value(c.turbine().outlet().vapourFraction()).si(), 0.0004, "quality");
-        PrintedValue.of("1794.8")
+        BookValue.of("1794.8")
                 .assertMatches(s.value(c.turbine().outlet().enthalpy()).inKilojoulesPerKilogram(), 0.3, "h2 in kJ/kg");
     }
 
@@ -125,16 +123,16 @@ class SteamCycleTableTest {
     void reheatOfVanWylenSonntagBorgnakke() {
         final Reheat c = Reheat.cycle();
         final Solution s = c.solve(4, 400, 0.4, 400, 0.01);
-        PrintedValue.of("528.2").assertMatches(s.value(c.high().power()).inKilowatts(), 0.1, "high-pressure work");
-        PrintedValue.of("769.3").assertMatches(s.value(c.low().power()).inKilowatts(), "low-pressure work");
-        PrintedValue.of("0.9757")
+        BookValue.of("528.2").assertMatches(s.value(c.high().power()).inKilowatts(), 0.1, "high-pressure work");
+        BookValue.of("769.3").assertMatches(s.value(c.low().power()).inKilowatts(), "low-pressure work");
+        BookValue.of("0.9757")
                 .assertMatches(s.value(c.high().outlet().vapourFraction()).si(), "quality before reheat");
-        PrintedValue.of("0.9669")
+        BookValue.of("0.9669")
                 .assertMatches(s.value(c.low().outlet().vapourFraction()).si(), 0.0001, "quality at the end");
-        PrintedValue.of("4.0").assertMatches(s.value(c.pump().power()).inKilowatts(), "pump work");
-        PrintedValue.of("195.8")
+        BookValue.of("4.0").assertMatches(s.value(c.pump().power()).inKilowatts(), "pump work");
+        BookValue.of("195.8")
                 .assertMatches(s.value(c.pump().outlet().enthalpy()).inKilojoulesPerKilogram(), "feedwater in kJ/kg");
-        PrintedValue.of("35.9").assertMatches(c.efficiencyInPercent(s), "thermal efficiency in %");
+        BookValue.of("35.9").assertMatches(c.efficiencyInPercent(s), "thermal efficiency in %");
     }
 
     /** 15 MPa, 600 °C; reheat 4 MPa, 600 °C; 10 kPa. */
@@ -142,8 +140,8 @@ class SteamCycleTableTest {
     void cengelExample10Point4() {
         final Reheat c = Reheat.cycle();
         final Solution s = c.solve(15, 600, 4, 600, 0.01);
-        PrintedValue.of("45.0").assertMatches(c.efficiencyInPercent(s), "thermal efficiency in %");
-        PrintedValue.of("0.896")
+        BookValue.of("45.0").assertMatches(c.efficiencyInPercent(s), "thermal efficiency in %");
+        BookValue.of("0.896")
                 .assertMatches(s.value(c.low().outlet().vapourFraction()).si(), "quality at the end");
     }
 
@@ -156,12 +154,12 @@ class SteamCycleTableTest {
                 .release(c.boiler().inlet().flow())
                 .given(c.net(), Power.megawatts(100))
                 .solve();
-        PrintedValue.of("40.3").assertMatches(c.efficiencyInPercent(s), "thermal efficiency in %");
-        PrintedValue.of("2.363e5")
+        BookValue.of("40.3").assertMatches(c.efficiencyInPercent(s), "thermal efficiency in %");
+        BookValue.of("2.363e5")
                 .assertMatches(
                         s.value(c.boiler().inlet().flow()).inKilogramsPerSecond() * 3600, 60, "steam flow in kg/h");
-        PrintedValue.of("148").assertMatches(s.value(c.condenser().duty()).inMegawatts(), "heat rejected in MW");
-        PrintedValue.of("0.9382")
+        BookValue.of("148").assertMatches(s.value(c.condenser().duty()).inMegawatts(), "heat rejected in MW");
+        BookValue.of("0.9382")
                 .assertMatches(s.value(c.low().outlet().vapourFraction()).si(), 0.0004, "quality at the end");
     }
 
@@ -209,10 +207,9 @@ class SteamCycleTableTest {
                 .given(feedPump.isentropicEfficiency(), percent(100))
                 .given(net, Power.megawatts(100))
                 .solve();
-        PrintedValue.of("0.1966").assertMatches(s.value(extraction.fraction(2)).si(), 0.0001, "extraction fraction");
-        PrintedValue.of("36.9")
-                .assertMatches(100 * 100 / s.value(boiler.duty()).inMegawatts(), "thermal efficiency in %");
-        PrintedValue.of("3.69e5")
+        BookValue.of("0.1966").assertMatches(s.value(extraction.fraction(2)).si(), 0.0001, "extraction fraction");
+        BookValue.of("36.9").assertMatches(100 * 100 / s.value(boiler.duty()).inMegawatts(), "thermal efficiency in %");
+        BookValue.of("3.69e5")
                 .assertMatches(s.value(boiler.inlet().flow()).inKilogramsPerSecond() * 3600, "steam flow in kg/h");
         assertEquals(0, s.closure().energy(), 1e-9);
     }

@@ -81,12 +81,27 @@ final class ExchangeGame {
             }
             spec = giveOriginal(spec, fresh);
         }
+        if (givesOneLossTwice(spec)) {
+            return null;
+        }
         try {
             final SolvePlan plan = spec.plan();
             return plan.assumptionsGivenWay().isEmpty() ? spec : null;
         } catch (SpecificationException e) {
             return null;
         }
+    }
+
+    /**
+     * Whether both efficiencies of one machine are given. They say the same loss in two ways; together they would settle
+     * the pressure ratio, and a machine without any change of state meets both.
+     */
+    private static boolean givesOneLossTwice(Specification spec) {
+        return spec.givenVariables().stream()
+                .filter(v -> v.name().equals("polytropic efficiency"))
+                .anyMatch(v -> spec.givenVariables().stream()
+                        .anyMatch(w ->
+                                w.component().equals(v.component()) && w.name().equals("isentropic efficiency")));
     }
 
     private <Q extends ScalarQuantity<Q, ?>> Specification giveOriginal(Specification spec, Variable<Q> variable) {
