@@ -13,6 +13,9 @@ import lostwork.plant.kernel.Workspace;
 /**
  * Computes what a solve did not need from what it found: the other properties of the states, the defined variables that
  * nothing asked for, and the requirements of the components. Compiled once for a plan; immutable and thread-safe.
+ *
+ * <p>It goes in two steps, since some definitions cost more than the solve, such as a path integral. The first one makes
+ * what the checks of a solution use; the rest waits until somebody reads it.
  */
 final class Completion {
     /** A defined variable and its equation, which is affine in it. */
@@ -21,21 +24,65 @@ final class Completion {
     private final SolvePlan plan;
     private final Layout layout;
     private final CallSites sites = new CallSites();
-    private final List<Definition> definitions = new ArrayList<>();
+    private final List<Definition> checked = new ArrayList<>();
+    private final List<Definition> later = new ArrayList<>();
+    private final boolean[] isLater;
     private final List<Tape> requirements = new ArrayList<>();
     private final List<Tape> tapes = new ArrayList<>();
 
     Completion(SolvePlan plan) {
         this.plan = plan;
         layout = plan.plant().layout();
-        orderDefinitions();
         for (Equations.Requirement requirement : plan.plant().requirements()) {
             requirements.add(compile(requirement.notNegative(), requirement.notNegative()));
         }
+        final List<Definition> definitions = orderedDefinitions();
+        final boolean[] used = usedByChecks();
+        // Backwards, so that what a used definition uses is marked before its turn.
+        for (int i = definitions.size() - 1; i >= 0; i--) {
+            if (used[definitions.get(i).slot()]) {
+                markSlots(definitions.get(i).tape(), used);
+            }
+        }
+        isLater = new boolean[layout.slots.size()];
+        for (Definition definition : definitions) {
+            (used[definition.slot()] ? checked : later).add(definition);
+            isLater[definition.slot()] = !used[definition.slot()];
+        }
     }
 
-    /** Each definition after those that it uses. */
-    private void orderDefinitions() {
+    /** The slots in requirements and at ports, which {@link Closure} reads. */
+    private boolean[] usedByChecks() {
+        final boolean[] used = new boolean[layout.slots.size()];
+        for (Tape requirement : requirements) {
+            markSlots(requirement, used);
+        }
+        for (Component component : plan.plant().components()) {
+            for (Port port : component.ports()) {
+                if (port instanceof MaterialPort material) {
+                    used[plan.plant().slotOf(material.flow())] = true;
+                } else if (port instanceof ShaftPort shaft) {
+                    used[plan.plant().slotOf(shaft.power())] = true;
+                } else if (port instanceof WirePort wire) {
+                    used[plan.plant().slotOf(wire.power())] = true;
+                } else if (port instanceof HeatPort heat) {
+                    used[plan.plant().slotOf(heat.rate())] = true;
+                    used[plan.plant().slotOf(heat.temperature())] = true;
+                }
+            }
+        }
+        return used;
+    }
+
+    private static void markSlots(Tape tape, boolean[] marks) {
+        for (int k = 0; k < tape.size(); k++) {
+            marks[tape.slot(k)] = true;
+        }
+    }
+
+    /** {@return the definitions of variables that the solve left out, each after those that it uses} */
+    private List<Definition> orderedDefinitions() {
+        final List<Definition> definitions = new ArrayList<>();
         final Plant plant = plan.plant();
         final List<Variable<?>> open = new ArrayList<>();
         final boolean[] pending = new boolean[layout.slots.size()];
@@ -59,6 +106,7 @@ final class Completion {
                 }
             }
         }
+        return definitions;
     }
 
     private Tape compile(Expression left, Expression right) {
@@ -70,7 +118,12 @@ final class Completion {
         return tape;
     }
 
-    /** {@return the values of all slots; NaN where there is none} */
+    /** {@return whether a slot is left to the second step} */
+    boolean isLater(int slot) {
+        return isLater[slot];
+    }
+
+    /** {@return the values of all slots but those of the second step; NaN where there is none} */
     double[] complete(double[] values) {
         final double[] all = new double[layout.slots.size()];
         for (int slot = 0; slot < all.length; slot++) {
@@ -80,6 +133,19 @@ final class Completion {
         for (Layout.StreamState state : layout.states) {
             completeState(state, all, point);
         }
+        return define(checked, all);
+    }
+
+    /**
+     * {@return the values of all slots; NaN where there is none}
+     *
+     * @param afterFirstStep what {@link #complete} gave
+     */
+    double[] completeAll(double[] afterFirstStep) {
+        return define(later, afterFirstStep.clone());
+    }
+
+    private double[] define(List<Definition> definitions, double[] all) {
         if (!definitions.isEmpty()) {
             final Workspace w = workspace(all);
             for (Definition definition : definitions) {

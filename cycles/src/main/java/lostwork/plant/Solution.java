@@ -16,6 +16,7 @@ public final class Solution {
     private final Specification specification;
     private final double[] values;
     private final double largestResidual;
+    private volatile @Nullable double[] checked;
     private volatile @Nullable double[] completed;
 
     Solution(SolvePlan plan, Specification specification, double[] values, double largestResidual) {
@@ -134,14 +135,27 @@ public final class Solution {
 
     /** {@return the value of a slot, NaN where there is none} */
     double si(int slot) {
-        return plan.isActive(slot) ? values[slot] : completed()[slot];
+        if (plan.isActive(slot)) {
+            return values[slot];
+        }
+        return (plan.completion().isLater(slot) ? completed() : checked())[slot];
     }
 
-    /** All slots, with the properties of states and the defined variables that the solve itself did not need. */
+    /** What the checks use: the properties of states and some defined variables that the solve itself did not need. */
+    private double[] checked() {
+        double[] some = checked;
+        if (some == null) {
+            some = plan.completion().complete(values);
+            checked = some;
+        }
+        return some;
+    }
+
+    /** All slots, with the defined variables that nothing asked for until now. */
     private double[] completed() {
         double[] all = completed;
         if (all == null) {
-            all = plan.completion().complete(values);
+            all = plan.completion().completeAll(checked());
             completed = all;
         }
         return all;
@@ -149,7 +163,7 @@ public final class Solution {
 
     /** {@return the value of each requirement of the plant, in its order; NaN where it has none} */
     double[] requirements() {
-        return plan.completion().requirements(completed());
+        return plan.completion().requirements(checked());
     }
 
     /** {@return the solution as text: states, machines, assumptions and closure} */
