@@ -303,10 +303,22 @@ abstract class PathPiece {
         private double temperatureByLogVolume(FluidState state) {
             final StatePoint point = new StatePoint();
             state.copyTo(point);
-            // Along the path dv = v dλ and dp = −n p dλ; dv = v_h dh + v_p dp gives dh; dT = T_h dh + T_p dp.
-            final double dp = -exponent * point.pressure;
-            final double dh = (point.volume - point.volumeByPressureAtEnthalpy * dp) / point.volumeByEnthalpy;
-            return point.temperatureByEnthalpy * dh + point.temperatureByPressureAtEnthalpy * dp;
+            // dT = T_h dh + T_p dp
+            return point.temperatureByEnthalpy * enthalpyByLogVolume(point)
+                    - point.temperatureByPressureAtEnthalpy * exponent * point.pressure;
+        }
+
+        /** {@return the heat per mass and logarithm of the volume in J/kg: dq = dh − v dp with dp = −n p d ln v} */
+        double heatByLogVolume(FluidState state) {
+            final StatePoint point = new StatePoint();
+            state.copyTo(point);
+            return enthalpyByLogVolume(point) + point.volume * exponent * point.pressure;
+        }
+
+        /** Along the path dv = v d ln v and dp = −n p d ln v; dv = v_h dh + v_p dp gives dh. */
+        private double enthalpyByLogVolume(StatePoint point) {
+            return (point.volume + point.volumeByPressureAtEnthalpy * exponent * point.pressure)
+                    / point.volumeByEnthalpy;
         }
     }
 }

@@ -14,16 +14,19 @@ final class Polytropes {
 
     private static final int IDEAL_STEPS = 16;
 
+    /** A larger exponent needs volumes that differ by less than the searches for states resolve. */
+    private static final double LARGEST = 1e6;
+
     private static final BracketedRoot ROOT = BracketedRoot.limitedTo(100).withAbsoluteAccuracy(1e-14);
 
     private Polytropes() {}
 
-    static void requireFinite(double exponent) {
-        if (!(Math.abs(exponent) <= Double.MAX_VALUE)) {
+    static void requireExponent(double exponent) {
+        if (!(Math.abs(exponent) <= LARGEST)) {
             throw new ProcessException(
                     Reason.EXPONENT,
                     "polytropic exponent = " + exponent
-                            + " must be a finite number; for constant volume take an isochoric" + " step");
+                            + " must be a number from -1e6 to 1e6; for constant volume take an" + " isochoric step");
         }
     }
 
@@ -94,12 +97,11 @@ final class Polytropes {
     static double exponentBetween(FluidState from, FluidState to) {
         final double exponent = Math.log(from.pressure().si() / to.pressure().si())
                 / Math.log(to.volume().si() / from.volume().si());
-        if (!(Math.abs(exponent) <= Double.MAX_VALUE)) {
+        if (!(Math.abs(exponent) <= LARGEST)) {
             throw new ProcessException(
                     Reason.EXPONENT,
-                    "no finite exponent leads from " + OpenChainException.point(from) + " to "
-                            + OpenChainException.point(to)
-                            + ", which have the same volume; take an isochoric step");
+                    "no polytropic exponent within -1e6 to 1e6 leads from " + OpenChainException.point(from) + " to "
+                            + OpenChainException.point(to) + ", which have the same volume; take an isochoric step");
         }
         return exponent;
     }

@@ -396,12 +396,12 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a volume per mass}
      *
      * @param volume the specific volume at the end
-     * @param exponent n of {@code p vⁿ}, finite: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
+     * @param exponent n of {@code p vⁿ}, -1e6 to 1e6: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      *     or the exponent does not fit
      */
     public ProcessChain polytropicTo(SpecificVolume volume, double exponent) {
-        Polytropes.requireFinite(exponent);
+        Polytropes.requireExponent(exponent);
         return then(ProcessKind.POLYTROPIC, exponent, volume, () -> Polytropes.endAtVolume(end(), exponent, volume));
     }
 
@@ -409,7 +409,7 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a volume}
      *
      * @param volume the volume of the mass at the end
-     * @param exponent n of {@code p vⁿ}, finite: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
+     * @param exponent n of {@code p vⁿ}, -1e6 to 1e6: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      *     or the exponent does not fit
      */
@@ -421,7 +421,7 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a multiple of the volume}
      *
      * @param ratio how many times, and which way
-     * @param exponent n of {@code p vⁿ}, finite: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
+     * @param exponent n of {@code p vⁿ}, -1e6 to 1e6: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      *     or the exponent does not fit
      */
@@ -433,12 +433,12 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a pressure}
      *
      * @param pressure the absolute pressure at the end
-     * @param exponent n of {@code p vⁿ}, finite: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
+     * @param exponent n of {@code p vⁿ}, -1e6 to 1e6: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      *     or the exponent does not fit
      */
     public ProcessChain polytropicTo(Pressure pressure, double exponent) {
-        Polytropes.requireFinite(exponent);
+        Polytropes.requireExponent(exponent);
         return then(
                 ProcessKind.POLYTROPIC, exponent, pressure, () -> Polytropes.endAtPressure(end(), exponent, pressure));
     }
@@ -447,7 +447,7 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a multiple of the pressure}
      *
      * @param ratio how many times, and which way
-     * @param exponent n of {@code p vⁿ}, finite: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
+     * @param exponent n of {@code p vⁿ}, -1e6 to 1e6: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      *     or the exponent does not fit
      */
@@ -459,12 +459,12 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a temperature}
      *
      * @param temperature the temperature at the end
-     * @param exponent n of {@code p vⁿ}, finite: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
+     * @param exponent n of {@code p vⁿ}, -1e6 to 1e6: 0 is isobaric, 1 is isothermal for an ideal gas, large is nearly isochoric
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      *     or the exponent does not fit
      */
     public ProcessChain polytropicTo(Temperature temperature, double exponent) {
-        Polytropes.requireFinite(exponent);
+        Polytropes.requireExponent(exponent);
         return then(
                 ProcessKind.POLYTROPIC,
                 exponent,
@@ -476,8 +476,8 @@ public final class ProcessChain {
      * {@return this chain and a polytropic step to a known state, as between two measured points; the exponent follows}
      *
      * @param state the state at the end, from the same {@code Fluid} object
-     * @throws ProcessException if the state belongs to another fluid, or has the same volume as the start, so that no finite
-     *     exponent leads there
+     * @throws ProcessException if the state belongs to another fluid, or has the same volume as the start, so that no exponent
+     *     leads there
      */
     public ProcessChain polytropicTo(FluidState state) {
         closedMass.startingAt(state);
@@ -522,16 +522,14 @@ public final class ProcessChain {
         return Energy.joules(steps.stream().mapToDouble(s -> s.heat().si()).sum());
     }
 
-    /** {@return the heat of the steps that take heat in} */
+    /** {@return the heat taken in, without what is given off; see {@link ProcessStep#heatIn}} */
     public Energy heatIn() {
-        return Energy.joules(
-                steps.stream().mapToDouble(s -> Math.max(0, s.heat().si())).sum());
+        return Energy.joules(steps.stream().mapToDouble(s -> s.heatIn().si()).sum());
     }
 
-    /** {@return the heat of the steps that give heat off, as a positive number} */
+    /** {@return the heat given off, as a positive number} */
     public Energy heatOut() {
-        return Energy.joules(
-                steps.stream().mapToDouble(s -> Math.max(0, -s.heat().si())).sum());
+        return Energy.joules(steps.stream().mapToDouble(s -> s.heatOut().si()).sum());
     }
 
     /** {@return how much the internal energy grows from start to end} */
@@ -640,7 +638,7 @@ public final class ProcessChain {
      * @param kind the kind of the last step; a polytropic one gets the exponent that fits
      * @throws OpenChainException if no step of this kind leads from the end to the start, since what it holds constant has
      *     another value there; it tells the gap
-     * @throws ProcessException if the property model does not hold along the way, or a polytropic step would have no finite
+     * @throws ProcessException if the property model does not hold along the way, or a polytropic step would have no
      *     exponent
      */
     public ProcessCycle closedBy(ProcessKind kind) {

@@ -12,9 +12,9 @@ import lostwork.quantity.Temperature;
  * A chain of steps that comes back to its start: an engine, or with the steps the other way round a refrigerator or heat
  * pump.
  *
- * <p>Heat in and heat out are counted over whole steps, as textbooks do: a step with net heat in counts as heat in, even if
- * it gives some of it off on the way (possible on a polytropic path only). An ideal regenerator, which keeps heat of one
- * step for another, takes that heat out of both counts.
+ * <p>Heat in is the heat of the steps that take heat in, as textbooks count it; a polytropic step that turns from one to the
+ * other on its way counts in parts, so that no cycle seems better than Carnot's. An ideal regenerator, which keeps heat of
+ * one step for another, takes that heat out of both counts.
  *
  * <p>Immutable and thread-safe.
  */
@@ -92,7 +92,7 @@ public final class ProcessCycle {
         return chain.temperatureEntropyArea();
     }
 
-    /** {@return the heat taken in from outside: over the steps with positive heat, less what a regenerator returns} */
+    /** {@return the heat taken in from outside: less what a regenerator returns} */
     public Energy heatIn() {
         return Energy.joules(chain.heatIn().si() - regeneratedJoules);
     }

@@ -133,6 +133,34 @@ public final class ProcessStep {
         return mass.times(specificHeat());
     }
 
+    /**
+     * {@return the heat taken in on the way, without what is given off on the way}
+     *
+     * <p>The heat of the step where that is positive, and zero otherwise; but a polytropic path can turn from taking heat in to
+     * giving it off, and then the parts are counted on their own.
+     */
+    public Energy heatIn() {
+        return mass.times(SpecificEnergy.joulesPerKilogram(positiveHeat()));
+    }
+
+    /** {@return the heat given off on the way, as a positive number; {@link #heatIn} less {@link #heat}} */
+    public Energy heatOut() {
+        return mass.times(SpecificEnergy.joulesPerKilogram(positiveHeat() - specificHeat));
+    }
+
+    private double positiveHeat() {
+        if (kind != ProcessKind.POLYTROPIC) {
+            return Math.max(0, specificHeat);
+        }
+        double sum = 0;
+        FluidState first = from;
+        for (FluidState last : HeatTurns.along(from, to, exponent)) {
+            sum += Math.max(0, between(kind, exponent, mass, first, last).specificHeat);
+            first = last;
+        }
+        return sum;
+    }
+
     /** {@return the work per mass} */
     public SpecificEnergy specificWork() {
         return SpecificEnergy.joulesPerKilogram(specificWork);
@@ -247,6 +275,7 @@ public final class ProcessStep {
      *
      * @param points how many states at least, 2 to 100,000
      * @throws IllegalArgumentException if the number is outside 2 to 100,000
+     * @throws lostwork.quantity.OutOfRangeException if the property model does not hold on the way, though at both ends
      */
     public List<FluidState> path(int points) {
         if (points < 2 || points > 100_000) {
@@ -269,6 +298,7 @@ public final class ProcessStep {
      * {@return the area under the path in the pressure–volume diagram, {@code ∫ p dV}, by quadrature along the path}
      *
      * @throws lostwork.solve.ConvergenceException if the quadrature does not settle
+     * @throws lostwork.quantity.OutOfRangeException if the property model does not hold on the way, though at both ends
      */
     public Energy pressureVolumeArea() {
         return mass.times(SpecificEnergy.joulesPerKilogram(pressureVolumeArea(pieces())));
@@ -278,6 +308,7 @@ public final class ProcessStep {
      * {@return the area under the path in the temperature–entropy diagram, {@code ∫ T dS}, by quadrature along the path}
      *
      * @throws lostwork.solve.ConvergenceException if the quadrature does not settle
+     * @throws lostwork.quantity.OutOfRangeException if the property model does not hold on the way, though at both ends
      */
     public Energy temperatureEntropyArea() {
         double area = 0;

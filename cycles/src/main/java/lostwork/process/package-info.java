@@ -21,7 +21,7 @@
  * the surroundings cancel.
  *
  * <p>In a cycle the net work equals the net heat and the area enclosed in both diagrams. The thermal efficiency is net work
- * per heat taken in, counted over the steps with positive heat as the textbooks do; no cycle exceeds {@code 1 − Tmin/Tmax} of
+ * per heat taken in, counted over the steps that take heat in as the textbooks do; no cycle exceeds {@code 1 − Tmin/Tmax} of
  * its extreme temperatures (Carnot).
  *
  * <h2>Accuracy and range</h2>
