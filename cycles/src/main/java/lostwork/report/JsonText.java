@@ -112,6 +112,19 @@ public final class JsonText {
         return this;
     }
 
+    /**
+     * Writes a member of the object that is open.
+     *
+     * @param name its name
+     * @param value its value, a whole number
+     * @return this
+     */
+    public JsonText put(String name, long value) {
+        name(name);
+        text.append(value);
+        return this;
+    }
+
     private JsonText name(String name) {
         separate();
         text.append(quoted(name)).append(": ");

@@ -11,6 +11,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.LongSupplier;
+import lostwork.examples.audit.OutputFolder.Content;
+import lostwork.examples.recovery.RecoveryDesign;
 import lostwork.fluid.FlashException;
 import lostwork.solve.SolveException;
 
@@ -72,22 +74,36 @@ final class AuditProgram {
         if (result.ranked().isEmpty()) {
             throw new RefusedInputException(survey.file() + ": every line is refused.");
         }
-        final String report = AuditReport.of(result);
-        final Map<String, String> files = new LinkedHashMap<>();
-        files.put("report.txt", report);
-        files.put("streams.csv", StreamCsv.of(result));
-        files.put("streams.json", StreamJson.of(result));
+        final Progress progress = new Progress(err, clock);
+        final RecoveryOutcome recovery = new RecoveryStudy(result, RecoveryDesign.smallWasteHeatPlant())
+                .run(tried -> progress.report("recovery plant: pressure " + tried + " tried"));
+        final String report = AuditReport.of(result, recovery);
+        final Map<String, Content> files = new LinkedHashMap<>();
+        files.put("report.txt", Content.of(report));
+        files.put("streams.csv", Content.of(StreamCsv.of(result)));
+        files.put("streams.json", Content.of(StreamJson.of(result)));
+        recovery.proposal().ifPresent(proposal -> putRecovery(files, result, proposal));
         if (arguments.survey().isEmpty()) {
-            files.put("example-survey.csv", bundledText(BUNDLED_SURVEY));
+            files.put("example-survey.csv", Content.of(bundledText(BUNDLED_SURVEY)));
         }
         if (arguments.site().isEmpty()) {
-            files.put("example-site.txt", bundledText(BUNDLED_SITE));
+            files.put("example-site.txt", Content.of(bundledText(BUNDLED_SITE)));
         }
         folder.write(files);
         out.print(report);
         out.println();
         out.println("Written to " + folder.path() + ": " + String.join(", ", files.keySet()));
         return result.problems().isEmpty() ? ALL_GOOD : SOME_LINES_REFUSED;
+    }
+
+    private static void putRecovery(Map<String, Content> files, AuditResult result, RecoveryProposal proposal) {
+        final RecoveryTables tables = new RecoveryTables(proposal);
+        files.put("plant.json", Content.of(RecoveryJson.of(result, proposal)));
+        files.put("plant-states.csv", Content.of(tables.states().toCsv()));
+        files.put("plant-machines.csv", Content.of(tables.machines().toCsv()));
+        files.put("plant-pressures.csv", Content.of(tables.pressures().toCsv()));
+        files.put("ledger.csv", proposal.recovery().ledger()::writeCsv);
+        files.put("ledger.json", proposal.recovery().ledger()::writeJson);
     }
 
     private AuditResult compute(Site site, Survey survey) {
@@ -110,7 +126,7 @@ final class AuditProgram {
                         "temperatures, a pressure and a composition within the range of the model"));
             }
             done++;
-            progress.report(done, survey.lines().size(), "streams");
+            progress.report(done + " of " + survey.lines().size() + " streams done");
         }
         problems.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
         return new AuditResult(site, survey, figures, problems);

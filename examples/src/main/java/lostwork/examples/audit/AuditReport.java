@@ -2,29 +2,32 @@ package lostwork.examples.audit;
 
 import java.util.ArrayList;
 import java.util.List;
-import lostwork.examples.audit.TextTable.Alignment;
-import lostwork.examples.audit.TextTable.Column;
 import lostwork.quantity.Energy;
 import lostwork.quantity.Power;
 import lostwork.quantity.Ratio;
+import lostwork.report.Table;
+import lostwork.report.Table.Cell;
 
 /** The report of an audit as text. */
 final class AuditReport {
     /** Stands where a stream has no figure. */
-    private static final String NONE = "-";
+    private static final Cell NONE = Cell.of("-");
 
     private final AuditResult result;
+    private final RecoveryOutcome recovery;
     private final List<String> lines = new ArrayList<>();
 
-    private AuditReport(AuditResult result) {
+    private AuditReport(AuditResult result, RecoveryOutcome recovery) {
         this.result = result;
+        this.recovery = recovery;
     }
 
-    static String of(AuditResult result) {
-        final AuditReport report = new AuditReport(result);
+    static String of(AuditResult result, RecoveryOutcome recovery) {
+        final AuditReport report = new AuditReport(result, recovery);
         report.heading();
         report.streams();
         report.ranking();
+        report.lines.addAll(RecoveryReport.lines(result, recovery));
         report.notes();
         report.rules();
         return String.join("\n", report.lines) + "\n";
@@ -46,6 +49,11 @@ final class AuditReport {
                 + count(refusedLines(), "line") + " refused"
                 + (result.problems().isEmpty() ? "" : ", see the end of this report"));
         result.survey().remarks().forEach(remark -> lines.add("           " + remark));
+        String head = "Result     ";
+        for (String line : RecoveryReport.summary(result, recovery)) {
+            lines.add(head + line);
+            head = " ".repeat(head.length());
+        }
         lines.add("");
     }
 
@@ -59,83 +67,89 @@ final class AuditReport {
     }
 
     private void streams() {
-        final TextTable table = new TextTable(List.of(
-                new Column("Stream", "", Alignment.LEFT),
-                new Column("Medium", "", Alignment.LEFT),
-                new Column("Supply", "°C", Alignment.RIGHT),
-                new Column("Lowest", "°C", Alignment.RIGHT),
-                new Column("Heat", "kW", Alignment.RIGHT),
-                new Column("Exergy", "kW", Alignment.RIGHT),
-                new Column("Quality", "%", Alignment.RIGHT),
-                new Column("Most work", "kW", Alignment.RIGHT)));
+        final Table.Builder table = Table.builder()
+                .words("Stream")
+                .words("Medium")
+                .numbers("Supply", "°C", 1)
+                .numbers("Lowest", "°C", 1)
+                .numbers("Heat", "kW", 1)
+                .numbers("Exergy", "kW", 1)
+                .numbers("Quality", "%", 1)
+                .numbers("Most work", "kW", 1);
         for (StreamFigures figures : result.ranked()) {
-            table.add(
-                    figures.stream().tag(),
-                    figures.mediumLabel(),
-                    Decimals.shortest(figures.stream().supply().inCelsius()),
-                    Decimals.shortest(figures.stream().lowest().inCelsius()),
+            table.row(
+                    Cell.of(figures.stream().tag()),
+                    Cell.of(figures.mediumLabel()),
+                    Cell.of(Decimals.shortest(figures.stream().supply().inCelsius())),
+                    Cell.of(Decimals.shortest(figures.stream().lowest().inCelsius())),
                     ifAny(figures, kilowatts(figures.heat().value())),
                     figures.exergyAtSupply().map(AuditReport::kilowatts).orElse(NONE),
                     figures.quality().map(AuditReport::percent).orElse(NONE),
                     ifAny(figures, kilowatts(figures.mostWork().value())));
         }
         final AuditTotals totals = result.totals();
-        table.add(
-                "All streams",
-                "",
-                "",
-                "",
+        table.row(
+                Cell.of("All streams"),
+                Cell.none(),
+                Cell.none(),
+                Cell.none(),
                 kilowatts(totals.heat()),
                 kilowatts(totals.exergyAtSupply()),
                 totals.heat().si() > 0 ? percent(totals.mostWork().over(totals.heat())) : NONE,
                 kilowatts(totals.mostWork()));
         lines.add("What leaves, and the most that the second law allows");
         lines.add("");
-        lines.addAll(table.lines());
-        lines.add("");
+        lines.add(table.build().toString());
     }
 
     private void ranking() {
         final String currency = result.site().currency();
-        final TextTable table = new TextTable(List.of(
-                new Column("Rank", "", Alignment.RIGHT),
-                new Column("Stream", "", Alignment.LEFT),
-                new Column("Likely work", "kW", Alignment.RIGHT),
-                new Column("Range", "kW", Alignment.RIGHT),
-                new Column("Hours", "h/a", Alignment.RIGHT),
-                new Column("Work", "MWh/a", Alignment.RIGHT),
-                new Column("As power", currency + "/a", Alignment.RIGHT),
-                new Column("CO2 spared", "t/a", Alignment.RIGHT),
-                new Column("Or as heat", currency + "/a", Alignment.RIGHT)));
+        final Table.Builder table = Table.builder()
+                .numbers("Rank", "", 0)
+                .words("Stream")
+                .numbers("Likely work", "kW", 1)
+                .numbers("Range", "kW", 1)
+                .numbers("Hours", "h/a", 0)
+                .numbers("Work", "MWh/a", 0)
+                .numbers("As power", currency + "/a", 0)
+                .numbers("CO2 spared", "t/a", 0)
+                .numbers("Or as heat", currency + "/a", 0);
         int rank = 0;
         for (StreamFigures figures : result.ranked()) {
             rank++;
             final Estimate likely = figures.likelyWork();
-            final List<String> cells = new ArrayList<>(List.of(
-                    figures.hasHeat() ? Integer.toString(rank) : NONE,
-                    figures.stream().tag(),
+            final Energy work = figures.likelyWorkPerYear();
+            table.row(
+                    ifAny(figures, Cell.of(rank)),
+                    Cell.of(figures.stream().tag()),
                     ifAny(figures, kilowatts(likely.value())),
-                    ifAny(figures, kilowatts(likely.low()) + " to " + kilowatts(likely.high())),
-                    whole(figures.stream().hoursPerYear().inHours())));
-            cells.addAll(yearly(figures.likelyWorkPerYear(), figures.heatPerYear()));
-            table.add(cells);
+                    ifAny(figures, Cell.of(range(likely))),
+                    Cell.of(figures.stream().hoursPerYear().inHours()),
+                    Cell.of(work.inMegawattHours()),
+                    Cell.of(result.worth(work).amount()),
+                    Cell.of(result.carbonDioxide(work).inTonnes()),
+                    Cell.of(result.worthAsHeat(figures.heatPerYear()).amount()));
         }
         final AuditTotals totals = result.totals();
-        final List<String> sums = new ArrayList<>(List.of("", "All streams", kilowatts(totals.likelyWork()), "", ""));
-        sums.addAll(yearly(totals.likelyWorkPerYear(), totals.heatPerYear()));
-        table.add(sums);
+        final Energy work = totals.likelyWorkPerYear();
+        table.row(
+                Cell.none(),
+                Cell.of("All streams"),
+                kilowatts(totals.likelyWork()),
+                Cell.none(),
+                Cell.none(),
+                Cell.of(work.inMegawattHours()),
+                Cell.of(result.worth(work).amount()),
+                Cell.of(result.carbonDioxide(work).inTonnes()),
+                Cell.of(result.worthAsHeat(totals.heatPerYear()).amount()));
         lines.add("What a machine is likely to give, ranked by its work in a year");
         lines.add("");
-        lines.addAll(table.lines());
-        lines.add("");
+        lines.add(table.build().toString());
     }
 
-    private List<String> yearly(Energy work, Energy heat) {
-        return List.of(
-                whole(work.inMegawattHours()),
-                whole(result.worth(work).amount()),
-                whole(result.carbonDioxide(work).inTonnes()),
-                whole(result.worthAsHeat(heat).amount()));
+    private static String range(Estimate estimate) {
+        return Decimals.fixed(estimate.low().inKilowatts(), 1) + " to "
+                + Decimals.fixed(estimate.high().inKilowatts(), 1);
     }
 
     private void notes() {
@@ -173,19 +187,15 @@ final class AuditReport {
         }
     }
 
-    private static String ifAny(StreamFigures figures, String text) {
-        return figures.hasHeat() ? text : NONE;
+    private static Cell ifAny(StreamFigures figures, Cell cell) {
+        return figures.hasHeat() ? cell : NONE;
     }
 
-    private static String percent(Ratio ratio) {
-        return Decimals.fixed(ratio.inPercent(), 1);
+    private static Cell percent(Ratio ratio) {
+        return Cell.of(ratio.inPercent());
     }
 
-    private static String whole(double value) {
-        return Decimals.fixed(value, 0);
-    }
-
-    private static String kilowatts(Power power) {
-        return Decimals.fixed(power.inKilowatts(), 1);
+    private static Cell kilowatts(Power power) {
+        return Cell.of(power.inKilowatts());
     }
 }

@@ -11,6 +11,23 @@ import java.util.Map;
 final class OutputFolder {
     private final Path folder;
 
+    /** What is in a file. */
+    @FunctionalInterface
+    interface Content {
+        /**
+         * Writes it.
+         *
+         * @param file the file to write or replace
+         * @throws IOException if it cannot be written
+         */
+        void writeTo(Path file) throws IOException;
+
+        /** {@return a text, written in UTF-8} */
+        static Content of(String text) {
+            return file -> Files.writeString(file, text, StandardCharsets.UTF_8);
+        }
+    }
+
     private OutputFolder(Path folder) {
         this.folder = folder;
     }
@@ -42,14 +59,14 @@ final class OutputFolder {
     /**
      * Writes files in UTF-8 with line feeds. Each one replaces an older file of its name as a whole.
      *
-     * @param contents the text of each file by its name
+     * @param contents the content of each file by its name
      * @throws RefusedInputException if a file cannot be written, such as when the disk is full
      */
-    void write(Map<String, String> contents) {
-        contents.forEach((name, text) -> {
+    void write(Map<String, Content> contents) {
+        contents.forEach((name, content) -> {
             final Path target = folder.resolve(name);
             try {
-                Files.writeString(target, text, StandardCharsets.UTF_8);
+                content.writeTo(target);
             } catch (IOException e) {
                 throw new RefusedInputException(Problem.ofFile(
                         target.toString(), "the file cannot be written", "a folder with room that you may write to"));

@@ -23,11 +23,11 @@ final class Progress {
         this.last = clock.getAsLong();
     }
 
-    void report(int done, int total, String noun) {
+    void report(String words) {
         final long now = clock.getAsLong();
         if (now - last >= PAUSE_NANOSECONDS) {
             last = now;
-            out.println(done + " of " + total + " " + noun + " done");
+            out.println(words);
         }
     }
 }

@@ -1,5 +1,6 @@
 package lostwork.examples.audit;
 
+import lostwork.exergy.ReferenceEnvironment;
 import lostwork.quantity.EmissionFactor;
 import lostwork.quantity.EnergyPrice;
 import lostwork.quantity.Pressure;
@@ -26,4 +27,9 @@ record Site(
         String currency,
         EnergyPrice powerPrice,
         EnergyPrice heatPrice,
-        EmissionFactor gridCarbonIntensity) {}
+        EmissionFactor gridCarbonIntensity) {
+    /** {@return the surroundings of the site, which all exergy is counted against} */
+    ReferenceEnvironment ambient() {
+        return ReferenceEnvironment.of(ambientTemperature, ambientPressure).withRelativeHumidity(relativeHumidity);
+    }
+}

@@ -16,8 +16,7 @@ final class StreamAnalysis {
 
     StreamAnalysis(Site site) {
         this.site = site;
-        this.ambient = ReferenceEnvironment.of(site.ambientTemperature(), site.ambientPressure())
-                .withRelativeHumidity(site.relativeHumidity());
+        this.ambient = site.ambient();
     }
 
     /**

@@ -1,7 +1,10 @@
 package lostwork.examples.audit;
 
-import java.util.ArrayList;
-import java.util.List;
+import lostwork.quantity.Energy;
+import lostwork.quantity.Power;
+import lostwork.quantity.Ratio;
+import lostwork.report.Table;
+import lostwork.report.Table.Cell;
 
 /** The figures of the streams as separated text (RFC 4180, but with line feeds): commas, decimal points, UTF-8. */
 final class StreamCsv {
@@ -9,78 +12,69 @@ final class StreamCsv {
 
     static String of(AuditResult result) {
         final String currency = result.site().currency();
-        final StringBuilder text = new StringBuilder();
-        text.append(line(List.of(
-                "rank",
-                "tag",
-                "medium",
-                "mass flow [kg/s]",
-                "supply temperature [°C]",
-                "lowest allowed temperature [°C]",
-                "counted down to [°C]",
-                "pressure [bar]",
-                "heat rejected [kW]",
-                "heat uncertainty [kW]",
-                "exergy at supply [kW]",
-                "mean exergetic quality [%]",
-                "most work [kW]",
-                "most work uncertainty [kW]",
-                "likely work [kW]",
-                "likely work uncertainty [kW]",
-                "hours per year [h]",
-                "heat per year [MWh]",
-                "likely work per year [MWh]",
-                "worth of work per year [" + currency + "]",
-                "CO2 spared per year [t]",
-                "worth of heat per year [" + currency + "]",
-                "notes")));
+        final Table.Builder table = Table.builder()
+                .numbers("rank", "", 0)
+                .words("tag")
+                .words("medium")
+                .numbers("mass flow", "kg/s", 4)
+                .numbers("supply temperature", "°C", 2)
+                .numbers("lowest allowed temperature", "°C", 2)
+                .numbers("counted down to", "°C", 2)
+                .numbers("pressure", "bar", 4)
+                .numbers("heat rejected", "kW", 2)
+                .numbers("heat uncertainty", "kW", 2)
+                .numbers("exergy at supply", "kW", 2)
+                .numbers("mean exergetic quality", "%", 2)
+                .numbers("most work", "kW", 2)
+                .numbers("most work uncertainty", "kW", 2)
+                .numbers("likely work", "kW", 2)
+                .numbers("likely work uncertainty", "kW", 2)
+                .numbers("hours per year", "h", 0)
+                .numbers("heat per year", "MWh", 1)
+                .numbers("likely work per year", "MWh", 1)
+                .numbers("worth of work per year", currency, 0)
+                .numbers("CO2 spared per year", "t", 1)
+                .numbers("worth of heat per year", currency, 0)
+                .words("notes");
         int rank = 0;
         for (StreamFigures figures : result.ranked()) {
             rank++;
-            text.append(line(cells(result, figures, rank)));
+            table.row(cells(result, figures, rank));
         }
-        return text.toString();
+        return table.build().toCsv();
     }
 
-    private static List<String> cells(AuditResult result, StreamFigures figures, int rank) {
+    private static Cell[] cells(AuditResult result, StreamFigures figures, int rank) {
         final SurveyLine stream = figures.stream();
-        final List<String> cells = new ArrayList<>();
-        cells.add(Integer.toString(rank));
-        cells.add(stream.tag());
-        cells.add(figures.mediumLabel());
-        cells.add(number(figures.massFlow().inKilogramsPerSecond()));
-        cells.add(number(stream.supply().inCelsius()));
-        cells.add(number(stream.lowest().inCelsius()));
-        cells.add(number(figures.lowestCounted().inCelsius()));
-        cells.add(number(stream.pressure().inBar()));
-        cells.add(number(figures.heat().value().inKilowatts()));
-        cells.add(number(figures.heat().uncertainty().inKilowatts()));
-        cells.add(figures.exergyAtSupply().map(x -> number(x.inKilowatts())).orElse(""));
-        cells.add(figures.quality().map(q -> number(q.inPercent())).orElse(""));
-        cells.add(number(figures.mostWork().value().inKilowatts()));
-        cells.add(number(figures.mostWork().uncertainty().inKilowatts()));
-        cells.add(number(figures.likelyWork().value().inKilowatts()));
-        cells.add(number(figures.likelyWork().uncertainty().inKilowatts()));
-        cells.add(number(stream.hoursPerYear().inHours()));
-        cells.add(number(figures.heatPerYear().inMegawattHours()));
-        cells.add(number(figures.likelyWorkPerYear().inMegawattHours()));
-        cells.add(number(result.worth(figures.likelyWorkPerYear()).amount()));
-        cells.add(number(result.carbonDioxide(figures.likelyWorkPerYear()).inTonnes()));
-        cells.add(number(result.worthAsHeat(figures.heatPerYear()).amount()));
-        cells.add(String.join("; ", figures.notes()));
-        return cells;
+        final Energy work = figures.likelyWorkPerYear();
+        return new Cell[] {
+            Cell.of(Integer.toString(rank)),
+            Cell.of(stream.tag()),
+            Cell.of(figures.mediumLabel()),
+            Cell.of(figures.massFlow().inKilogramsPerSecond()),
+            Cell.of(stream.supply().inCelsius()),
+            Cell.of(stream.lowest().inCelsius()),
+            Cell.of(figures.lowestCounted().inCelsius()),
+            Cell.of(stream.pressure().inBar()),
+            kilowatts(figures.heat().value()),
+            kilowatts(figures.heat().uncertainty()),
+            figures.exergyAtSupply().map(StreamCsv::kilowatts).orElse(Cell.none()),
+            figures.quality().map(Ratio::inPercent).map(Cell::of).orElse(Cell.none()),
+            kilowatts(figures.mostWork().value()),
+            kilowatts(figures.mostWork().uncertainty()),
+            kilowatts(figures.likelyWork().value()),
+            kilowatts(figures.likelyWork().uncertainty()),
+            Cell.of(stream.hoursPerYear().inHours()),
+            Cell.of(figures.heatPerYear().inMegawattHours()),
+            Cell.of(work.inMegawattHours()),
+            Cell.of(result.worth(work).amount()),
+            Cell.of(result.carbonDioxide(work).inTonnes()),
+            Cell.of(result.worthAsHeat(figures.heatPerYear()).amount()),
+            Cell.of(String.join("; ", figures.notes()))
+        };
     }
 
-    private static String number(double value) {
-        return Decimals.shortest(value);
-    }
-
-    private static String line(List<String> cells) {
-        final List<String> quoted = new ArrayList<>();
-        for (String cell : cells) {
-            quoted.add(
-                    cell.indexOf(',') >= 0 || cell.indexOf('"') >= 0 ? '"' + cell.replace("\"", "\"\"") + '"' : cell);
-        }
-        return String.join(",", quoted) + "\n";
+    private static Cell kilowatts(Power power) {
+        return Cell.of(power.inKilowatts());
     }
 }

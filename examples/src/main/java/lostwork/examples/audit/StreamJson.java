@@ -1,5 +1,9 @@
 package lostwork.examples.audit;
 
+import lostwork.quantity.Power;
+import lostwork.quantity.Ratio;
+import lostwork.report.JsonText;
+
 /** The figures of the audit as JSON; each name carries its unit. */
 final class StreamJson {
     private StreamJson() {}
@@ -26,8 +30,8 @@ final class StreamJson {
                     .closeObject();
         }
         return json.closeArray()
-                .put("likelyWorkRule", AuditRules.LIKELY_WORK)
-                .put("uncertaintyRule", AuditRules.UNCERTAINTY)
+                .put("rule of the likely work", AuditRules.LIKELY_WORK)
+                .put("rule of the uncertainty", AuditRules.UNCERTAINTY)
                 .put("caution", AuditRules.CAUTION)
                 .closeObject()
                 .toString();
@@ -36,26 +40,30 @@ final class StreamJson {
     private static void site(JsonText json, Site site) {
         json.openObject("site")
                 .put("name", site.name())
-                .put("ambientTemperature_C", site.ambientTemperature().inCelsius())
-                .put("ambientPressure_mbar", site.ambientPressure().inMbar())
-                .put("relativeHumidity_percent", site.relativeHumidity().inPercent())
+                .put("ambient temperature in °C", site.ambientTemperature().inCelsius())
+                .put("ambient pressure in mbar", site.ambientPressure().inMbar())
+                .put("relative humidity in %", site.relativeHumidity().inPercent())
                 .put("currency", site.currency())
-                .put("powerPrice_perMWh", site.powerPrice().inPerMegawattHour())
-                .put("heatPrice_perMWh", site.heatPrice().inPerMegawattHour())
                 .put(
-                        "gridCarbonIntensity_kg_per_MWh",
+                        "power price in " + site.currency() + "/MWh",
+                        site.powerPrice().inPerMegawattHour())
+                .put(
+                        "heat price in " + site.currency() + "/MWh",
+                        site.heatPrice().inPerMegawattHour())
+                .put(
+                        "grid carbon intensity in kg/MWh",
                         site.gridCarbonIntensity().inKilogramsPerMegawattHour())
                 .closeObject();
     }
 
     private static void totals(JsonText json, AuditTotals totals) {
-        json.openObject("allStreams")
-                .put("heat_kW", totals.heat().inKilowatts())
-                .put("exergyAtSupply_kW", totals.exergyAtSupply().inKilowatts())
-                .put("mostWork_kW", totals.mostWork().inKilowatts())
-                .put("likelyWork_kW", totals.likelyWork().inKilowatts())
-                .put("heatPerYear_MWh", totals.heatPerYear().inMegawattHours())
-                .put("likelyWorkPerYear_MWh", totals.likelyWorkPerYear().inMegawattHours())
+        json.openObject("all streams")
+                .put("heat in kW", totals.heat().inKilowatts())
+                .put("exergy at supply in kW", totals.exergyAtSupply().inKilowatts())
+                .put("most work in kW", totals.mostWork().inKilowatts())
+                .put("likely work in kW", totals.likelyWork().inKilowatts())
+                .put("heat per year in MWh", totals.heatPerYear().inMegawattHours())
+                .put("likely work per year in MWh", totals.likelyWorkPerYear().inMegawattHours())
                 .closeObject();
     }
 
@@ -65,33 +73,31 @@ final class StreamJson {
                 .put("rank", rank)
                 .put("tag", stream.tag())
                 .put("medium", figures.mediumLabel())
-                .put("massFlow_kg_per_s", figures.massFlow().inKilogramsPerSecond())
-                .put("supplyTemperature_C", stream.supply().inCelsius())
-                .put("lowestAllowedTemperature_C", stream.lowest().inCelsius())
-                .put("countedDownTo_C", figures.lowestCounted().inCelsius())
-                .put("pressure_bar", stream.pressure().inBar());
+                .put("mass flow in kg/s", figures.massFlow().inKilogramsPerSecond())
+                .put("supply temperature in °C", stream.supply().inCelsius())
+                .put("lowest allowed temperature in °C", stream.lowest().inCelsius())
+                .put("counted down to in °C", figures.lowestCounted().inCelsius())
+                .put("pressure in bar", stream.pressure().inBar());
         estimate(json, "heat", figures.heat());
-        figures.exergyAtSupply()
-                .ifPresentOrElse(
-                        exergy -> json.put("exergyAtSupply_kW", exergy.inKilowatts()),
-                        () -> json.putNull("exergyAtSupply_kW"));
-        figures.quality()
-                .ifPresentOrElse(
-                        quality -> json.put("meanExergeticQuality_percent", quality.inPercent()),
-                        () -> json.putNull("meanExergeticQuality_percent"));
-        estimate(json, "mostWork", figures.mostWork());
-        estimate(json, "likelyWork", figures.likelyWork());
-        json.put("hoursPerYear", stream.hoursPerYear().inHours())
-                .put("heatPerYear_MWh", figures.heatPerYear().inMegawattHours())
-                .put("likelyWorkPerYear_MWh", figures.likelyWorkPerYear().inMegawattHours())
+        json.put(
+                        "exergy at supply in kW",
+                        figures.exergyAtSupply().map(Power::inKilowatts).orElse(Double.NaN))
                 .put(
-                        "worthOfWorkPerYear",
+                        "mean exergetic quality in %",
+                        figures.quality().map(Ratio::inPercent).orElse(Double.NaN));
+        estimate(json, "most work", figures.mostWork());
+        estimate(json, "likely work", figures.likelyWork());
+        json.put("hours per year", stream.hoursPerYear().inHours())
+                .put("heat per year in MWh", figures.heatPerYear().inMegawattHours())
+                .put("likely work per year in MWh", figures.likelyWorkPerYear().inMegawattHours())
+                .put(
+                        "worth of work per year in " + result.site().currency(),
                         result.worth(figures.likelyWorkPerYear()).amount())
                 .put(
-                        "carbonDioxideSparedPerYear_t",
+                        "CO2 spared per year in t",
                         result.carbonDioxide(figures.likelyWorkPerYear()).inTonnes())
                 .put(
-                        "worthOfHeatPerYear",
+                        "worth of heat per year in " + result.site().currency(),
                         result.worthAsHeat(figures.heatPerYear()).amount())
                 .openArray("notes");
         figures.notes().forEach(json::element);
@@ -99,7 +105,7 @@ final class StreamJson {
     }
 
     private static void estimate(JsonText json, String name, Estimate estimate) {
-        json.put(name + "_kW", estimate.value().inKilowatts())
-                .put(name + "Uncertainty_kW", estimate.uncertainty().inKilowatts());
+        json.put(name + " in kW", estimate.value().inKilowatts())
+                .put(name + " uncertainty in kW", estimate.uncertainty().inKilowatts());
     }
 }

@@ -12,7 +12,6 @@ enum SurveyGas {
     CH4,
     SO2,
     NO,
-    NO2,
     N2O,
     NH3,
     HE("He");

@@ -57,7 +57,8 @@ class AuditProgramTest {
         final List<String> lines = output().lines().toList();
         assertEquals(
                 "Written to " + results()
-                        + ": report.txt, streams.csv, streams.json, example-survey.csv, example-site.txt",
+                        + ": report.txt, streams.csv, streams.json, plant.json, plant-states.csv, plant-machines.csv,"
+                        + " plant-pressures.csv, ledger.csv, ledger.json, example-survey.csv, example-site.txt",
                 lines.get(lines.size() - 1));
         assertTrue(output().startsWith(Files.readString(results().resolve("report.txt"))));
         assertTrue(lines.stream().allMatch(line -> line.length() <= 120 || line.startsWith("Written to")));

@@ -160,9 +160,9 @@ class GlassworksByHandTest {
     @Test
     void everyStreamAgrees() {
         byHand().forEach((tag, hand) -> {
-            assertClose(tag + " heat", hand.heat(), column(tag, "heat rejected [kW]"));
-            assertClose(tag + " most work", hand.most(), column(tag, "most work [kW]"));
-            assertClose(tag + " likely work", hand.likely(), column(tag, "likely work [kW]"));
+            assertClose(tag + " heat", hand.heat(), column(tag, "heat rejected in kW"));
+            assertClose(tag + " most work", hand.most(), column(tag, "most work in kW"));
+            assertClose(tag + " likely work", hand.likely(), column(tag, "likely work in kW"));
         });
     }
 

@@ -17,7 +17,7 @@ class ProgressTest {
                 new Progress(new PrintStream(out, true, StandardCharsets.UTF_8), () -> milliseconds.get() * 1_000_000);
         for (int done = 1; done <= 25; done++) {
             milliseconds.addAndGet(100);
-            progress.report(done, 25, "streams");
+            progress.report(done + " of 25 streams done");
         }
         assertEquals(
                 "10 of 25 streams done\n20 of 25 streams done\n",
