@@ -410,7 +410,7 @@ public final class BlockSolver {
         int polished = 0;
         for (int iteration = 0; iteration < NEWTON_ITERATIONS; iteration++) {
             checkLimits(number, block);
-            if (!Double.isFinite(norm)) {
+            if (!Double.isFinite(norm) || !isFinite(n)) {
                 return false;
             }
             if (norm <= CONVERGED && polished++ >= 1 || norm == 0) {
@@ -445,7 +445,7 @@ public final class BlockSolver {
             }
             norm = evaluateLoop(block, slots);
         }
-        return norm <= ACCEPTED;
+        return norm <= ACCEPTED && isFinite(n);
     }
 
     /** Moves the unknowns along the step, each at most to nine tenths of the way to its limit. */
@@ -489,12 +489,16 @@ public final class BlockSolver {
         return a >= b ? a : b > a ? b : Double.NaN;
     }
 
-    private boolean newtonStep(int n) {
+    private boolean isFinite(int n) {
         for (int i = 0; i < n * n; i++) {
             if (!Double.isFinite(matrix[i])) {
                 return false;
             }
         }
+        return true;
+    }
+
+    private boolean newtonStep(int n) {
         for (int i = 0; i < n; i++) {
             step[i] = -residuals[i];
         }
