@@ -161,6 +161,15 @@ public final class Solution {
         return all;
     }
 
+    /**
+     * Computes the properties of all states.
+     *
+     * @throws lostwork.quantity.OutOfRangeException if a state lies outside the range of its fluid
+     */
+    void complete() {
+        completed();
+    }
+
     /** {@return the value of each requirement of the plant, in its order; NaN where it has none} */
     double[] requirements() {
         return plan.completion().requirements(checked());

@@ -12,6 +12,7 @@ import lostwork.plant.kernel.EquationSystem;
 import lostwork.plant.kernel.Limits;
 import lostwork.plant.kernel.Tape;
 import lostwork.plant.kernel.Workspace;
+import lostwork.quantity.OutOfRangeException;
 
 /**
  * The diagnosed, ordered and compiled form of a plant and of the list of what is given: which equations are solved in
@@ -178,7 +179,13 @@ public final class SolvePlan {
         if (solver.anyOutsideRange()) {
             throw outsideRange(w);
         }
-        return new Solution(this, specification, w.copyOfValues(), largest);
+        final Solution solution = new Solution(this, specification, w.copyOfValues(), largest);
+        try {
+            solution.complete();
+        } catch (OutOfRangeException e) {
+            throw outsideRange(w); // a state whose temperature and entropy no equation used
+        }
+        return solution;
     }
 
     private void warm(Solution start, Workspace w) {
@@ -198,7 +205,7 @@ public final class SolvePlan {
             final double h = w.get(state.slot(SlotRole.ENTHALPY));
             try {
                 state.model().atPressureEnthalpy(p, h, new lostwork.fluid.StatePoint());
-            } catch (lostwork.quantity.OutOfRangeException e) {
+            } catch (OutOfRangeException e) {
                 return new PlantSolveException(
                         PlantSolveException.Reason.OUTSIDE_RANGE,
                         "plant \"" + plant.name() + "\": the given values lead out of the range of "

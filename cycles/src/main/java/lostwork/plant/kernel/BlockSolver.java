@@ -23,6 +23,9 @@ public final class BlockSolver {
     /** Reciprocal condition below which the singular values are looked at. */
     private static final double SUSPICIOUS = 1e-7;
 
+    /** Scaled residual of a cut loop from which the Newton iteration on the whole loop takes over. */
+    private static final double CLOSE = 1e-7;
+
     private static final int SINGLE_ITERATIONS = 60;
     private static final int SCAN_POINTS = 48;
     private static final int NEWTON_ITERATIONS = 80;
@@ -336,6 +339,10 @@ public final class BlockSolver {
                 finishLoop(number, block, slots);
                 return;
             }
+            if (attempt == 0 && solveTorn(number, block, slots, first) && !isOutside(block)) {
+                finishLoop(number, block, slots);
+                return;
+            }
             final double reached = residualNorm(block);
             if (reached < bestResidual) {
                 bestResidual = reached;
@@ -349,6 +356,89 @@ public final class BlockSolver {
             w.x[slots[j]] = bestStart[j];
         }
         throw failure(BlockFailure.Reason.NOT_MET, number, block);
+    }
+
+    /** Cuts the loop open at one unknown, looks for a change of sign over its whole range, and polishes what it finds. */
+    private boolean solveTorn(int number, int[] block, int[] slots, double[] start) {
+        for (Tearing cut : Tearing.of(system, block)) {
+            checkLimits(number, block);
+            for (int j = 0; j < slots.length; j++) {
+                w.x[slots[j]] = start[j];
+            }
+            if (scanCut(cut, w.x[cut.slot()]) && iterate(number, block, slots)) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private boolean scanCut(Tearing cut, double start) {
+        final SlotScale bounds = system.scales().get(cut.slot());
+        final double[] at = new double[SCAN_POINTS];
+        final double[] r = new double[SCAN_POINTS];
+        for (int i = 0; i < SCAN_POINTS; i++) {
+            at[i] = pointBetween(bounds, (double) i / (SCAN_POINTS - 1));
+            r[i] = residualOfCut(cut, at[i]);
+        }
+        final Integer[] order = new Integer[SCAN_POINTS - 1];
+        Arrays.setAll(order, i -> i);
+        Arrays.sort(order, (a, b) -> Double.compare(Math.abs(at[a] - start), Math.abs(at[b] - start)));
+        int roots = 0;
+        for (int i : order) {
+            if (r[i] * r[i + 1] <= 0 && bisectCut(cut, at[i], at[i + 1], r[i]) && roots++ == limits.search()) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    /** Bisection with secant steps; true when the change of sign is a root and no jump. */
+    private boolean bisectCut(Tearing cut, double low, double high, double lowResidual) {
+        double a = low;
+        double b = high;
+        double ra = lowResidual;
+        double rb = residualOfCut(cut, high);
+        for (int i = 0; i < 2 * SINGLE_ITERATIONS; i++) {
+            final double secant = a - ra * (b - a) / (rb - ra);
+            final double u = i % 3 != 2 && secant > a && secant < b ? secant : 0.5 * (a + b);
+            final double r = residualOfCut(cut, u);
+            if (Double.isNaN(r)) {
+                return false;
+            }
+            if (scaledResidual(cut.residual()) <= CLOSE) {
+                return true;
+            }
+            if (u == a || u == b) {
+                return false;
+            }
+            if (r * ra > 0) {
+                a = u;
+                ra = r;
+            } else {
+                b = u;
+                rb = r;
+            }
+        }
+        return false;
+    }
+
+    /** The residual that is left when the loop is cut at a value and all other unknowns follow from it. */
+    private double residualOfCut(Tearing cut, double value) {
+        w.x[cut.slot()] = value;
+        for (int i = 0; i < cut.slots().length; i++) {
+            final Tape tape = system.equations().get(cut.equations()[i]);
+            final int slot = cut.slots()[i];
+            final int place = tape.placeOf(slot);
+            if (tape.isAffineIn(place)) {
+                w.x[slot] = w.solveAffine(tape, slot);
+            } else if (!newton(tape, place, slot) && !scan(tape, place, slot, w.x[slot])) {
+                return Double.NaN;
+            }
+            if (!Double.isFinite(w.x[slot])) {
+                return Double.NaN;
+            }
+        }
+        return system.equations().get(cut.residual()).forward(w);
     }
 
     private boolean isOutside(int[] block) {
