@@ -16,8 +16,7 @@ public final class Solution {
     private final Specification specification;
     private final double[] values;
     private final double largestResidual;
-    private volatile @Nullable double[] checked;
-    private volatile @Nullable double[] completed;
+    private volatile Completion.@Nullable Values completed;
 
     Solution(SolvePlan plan, Specification specification, double[] values, double largestResidual) {
         this.plan = plan;
@@ -135,27 +134,13 @@ public final class Solution {
 
     /** {@return the value of a slot, NaN where there is none} */
     double si(int slot) {
-        if (plan.isActive(slot)) {
-            return values[slot];
-        }
-        return (plan.completion().isLater(slot) ? completed() : checked())[slot];
+        return plan.isActive(slot) ? values[slot] : completed().get(slot);
     }
 
-    /** What the checks use: the properties of states and some defined variables that the solve itself did not need. */
-    private double[] checked() {
-        double[] some = checked;
-        if (some == null) {
-            some = plan.completion().complete(values);
-            checked = some;
-        }
-        return some;
-    }
-
-    /** All slots, with the defined variables that nothing asked for until now. */
-    private double[] completed() {
-        double[] all = completed;
+    private Completion.Values completed() {
+        Completion.Values all = completed;
         if (all == null) {
-            all = plan.completion().completeAll(checked());
+            all = plan.completion().of(values);
             completed = all;
         }
         return all;
@@ -172,7 +157,7 @@ public final class Solution {
 
     /** {@return the value of each requirement of the plant, in its order; NaN where it has none} */
     double[] requirements() {
-        return plan.completion().requirements(checked());
+        return completed().requirements();
     }
 
     /** {@return the solution as text: states, machines, assumptions and closure} */

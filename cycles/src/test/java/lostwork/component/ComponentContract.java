@@ -29,6 +29,9 @@ import org.junit.jupiter.api.Test;
  * <p>A test of a component extends this class and says how to draw a case.
  */
 abstract class ComponentContract {
+    /** Room for the truncation of central differences, relative. */
+    private static final double DERIVATIVES = 1e-6;
+
     private static final int CASES = 40;
     /** Relative step of the central differences; the error of a difference is about its square plus 1e-16 over it. */
     private static final double STEP = 1e-4;
@@ -47,11 +50,6 @@ abstract class ComponentContract {
     /** Draws a case whose equations have no kink nearby, for the comparison with differences. */
     Case drawSmooth(SplittableRandom random) {
         return draw(random);
-    }
-
-    /** How closely derivatives agree with differences: the smoothness of the fluid, not of the component, sets it. */
-    double derivativeTolerance() {
-        return 1e-6;
     }
 
     @Test
@@ -108,7 +106,7 @@ abstract class ComponentContract {
                                     / Math.max(
                                             Math.abs(centre),
                                             1e-3 * given.kind().naturalScale()));
-                    assertEquals(exact, difference, derivativeTolerance() * scale, of + " by " + given);
+                    assertEquals(exact, difference, DERIVATIVES * scale, of + " by " + given);
                     compared++;
                 }
             }

@@ -19,10 +19,4 @@ class CondenserLawTest extends ComponentContract {
                         .given(condenser.outlet().subcooling(), kelvins(between(random, 1, 8)))
                         .given(condenser.heat().temperature(), celsius(between(random, 2, 20))));
     }
-
-    /** The saturation equation of IAPWS-IF97 agrees with the Clausius–Clapeyron slope of regions 1 and 2 to some 1e-5. */
-    @Override
-    double derivativeTolerance() {
-        return 3e-4;
-    }
 }

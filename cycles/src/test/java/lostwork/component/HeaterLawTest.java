@@ -21,13 +21,4 @@ class HeaterLawTest extends ComponentContract {
                         .given(heater.relativePressureLoss(), Ratio.percent(between(random, 0, 10)))
                         .given(heater.heat().temperature(), celsius(between(random, 600, 900))));
     }
-
-    /**
-     * The solver takes the slope of the saturation line from Clausius and Clapeyron. The saturation line of IAPWS-IF97 is
-     * an equation of its own and meets that slope to about 3e-4 only, so derivatives along saturation carry as much.
-     */
-    @Override
-    double derivativeTolerance() {
-        return 5e-4;
-    }
 }

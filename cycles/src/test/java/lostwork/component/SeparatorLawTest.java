@@ -31,13 +31,4 @@ class SeparatorLawTest extends ComponentContract {
     void exchanges(int count) {
         // A separator has no variables of its own.
     }
-
-    /**
-     * The solver takes the slope of the saturation line from Clausius and Clapeyron. The saturation line of IAPWS-IF97 is
-     * an equation of its own and meets that slope to about 3e-4 only, so derivatives along saturation carry as much.
-     */
-    @Override
-    double derivativeTolerance() {
-        return 5e-4;
-    }
 }

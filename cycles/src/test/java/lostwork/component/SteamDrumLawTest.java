@@ -36,15 +36,6 @@ class SteamDrumLawTest extends ComponentContract {
                         .given(drum.riser().flow(), kilogramsPerSecond(between(random, 200, 500))));
     }
 
-    /**
-     * The solver takes the slope of the saturation line from Clausius and Clapeyron. The saturation line of IAPWS-IF97 is
-     * an equation of its own and meets that slope to about 3e-4 only, so derivatives along saturation carry as much.
-     */
-    @Override
-    double derivativeTolerance() {
-        return 5e-4;
-    }
-
     /** Up to about 30 bar the enthalpy of saturated steam rises with pressure; above, one flow belongs to two pressures. */
     @Override
     Case drawSmooth(SplittableRandom random) {

@@ -172,9 +172,9 @@ final class PropertyCall {
         this.bySecond = bySecond;
     }
 
-    /** dT/dp along the saturation line (Clausius–Clapeyron). */
+    /** dT/dp along the saturation line, from the saturation equation itself. */
     private double saturationSlope() {
-        return liquid.temperature * (vapour.volume - liquid.volume) / (vapour.enthalpy - liquid.enthalpy);
+        return 1 / requireSaturation().pressureByTemperature(liquid.temperature);
     }
 
     /** dh/dp of one side along the saturation line. */

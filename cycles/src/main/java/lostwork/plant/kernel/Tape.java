@@ -216,8 +216,12 @@ public final class Tape {
         return value[left] - value[right];
     }
 
-    /** {@return whether a property function of the equation lay outside the range of its fluid in its last evaluation} */
-    boolean isOutside(Workspace w) {
+    /**
+     * {@return whether a property function of the equation lay outside the range of its fluid in its last evaluation}
+     *
+     * @param w the workspace that it was evaluated on
+     */
+    public boolean isOutside(Workspace w) {
         for (int i = 0; i < ops.length; i++) {
             if (ops[i] == Op.PROPERTY && w.property(sites[i]).outside()) {
                 return true;
