@@ -77,7 +77,16 @@ public final class ProcessChain {
     }
 
     private String describe(ProcessKind kind, Object asked) {
-        return "step " + (steps.size() + 1) + ", " + kind + " from " + OpenChainException.point(end()) + " to " + asked;
+        return "step " + (steps.size() + 1) + ", " + kind + " from " + OpenChainException.point(end())
+                + (asked instanceof HeatAsked ? " with " : " to ") + asked;
+    }
+
+    /** A heat as the end of a step, for messages. */
+    private record HeatAsked(SpecificEnergy heat) {
+        @Override
+        public String toString() {
+            return heat + " of heat";
+        }
     }
 
     private Fluid fluid() {
@@ -188,7 +197,7 @@ public final class ProcessChain {
      * @throws ProcessException if the end cannot be reached within the range of the fluid
      */
     public ProcessChain isothermalAdding(SpecificEnergy heat) {
-        return then(ProcessKind.ISOTHERMAL, heat + " of heat", () -> IsothermalHeating.end(end(), heat.si()));
+        return then(ProcessKind.ISOTHERMAL, new HeatAsked(heat), () -> IsothermalHeating.end(end(), heat.si()));
     }
 
     /**
@@ -300,7 +309,7 @@ public final class ProcessChain {
     public ProcessChain isochoricAdding(SpecificEnergy heat) {
         return then(
                 ProcessKind.ISOCHORIC,
-                heat + " of heat",
+                new HeatAsked(heat),
                 () -> fluid().state(end().internalEnergy().plus(heat), end().volume()));
     }
 
@@ -378,7 +387,7 @@ public final class ProcessChain {
     public ProcessChain isobaricAdding(SpecificEnergy heat) {
         return then(
                 ProcessKind.ISOBARIC,
-                heat + " of heat",
+                new HeatAsked(heat),
                 () -> fluid().state(end().pressure(), end().enthalpy().plus(heat)));
     }
 
