@@ -7,6 +7,7 @@ import lostwork.quantity.Entropy;
 import lostwork.quantity.PressureDifference;
 import lostwork.quantity.Ratio;
 import lostwork.quantity.Temperature;
+import lostwork.quantity.Units;
 
 /**
  * A chain of steps that comes back to its start: an engine, or with the steps the other way round a refrigerator or heat
@@ -214,7 +215,7 @@ public final class ProcessCycle {
         }
         text.append('\n');
         if (netWork().si() > 0) {
-            text.append("thermal efficiency ").append(thermalEfficiency());
+            text.append("thermal efficiency ").append(thermalEfficiency().format(Units.PERCENT, 4));
             text.append(", mean effective pressure ").append(meanEffectivePressure());
         } else if (netWork().si() < 0) {
             text.append("COP as refrigerator ").append(refrigeratorCop());

@@ -15,6 +15,17 @@
  * balance. A second, independent count is the area in the diagrams: {@code ∫ p dV} and {@code ∫ T dS} by adaptive
  * Gauss–Kronrod quadrature, cut where the path crosses the saturation line. In the two-phase region an isotherm is an isobar.
  *
+ * <pre>{@code
+ * var steam = ClosedMass.of(Water.industrial(), kilograms(0.2));
+ * var stroke = steam.startingAt(celsius(300), bar(10)).isentropicTo(bar(1.2));
+ * var cycle = stroke.isobaricTo(Ratio.fraction(0.3)).closedBy(ProcessKind.POLYTROPIC);
+ * stroke.netWork();                                  // 68.5 kJ
+ * cycle.netWork();                                   // 32.5 kJ
+ * var site = ReferenceEnvironment.of(celsius(15), bar(1));
+ * stroke.usefulWork(site);                           // 45.9 kJ ...
+ * stroke.exergyChange(site);                         // ... paid for with 45.9 kJ of exergy
+ * }</pre>
+ *
  * <p>A chain need not come back. A single expansion is as legitimate as a cycle, and does more work: nothing has been spent
  * on the way back. What it has used up instead is the exergy of the closed mass, and {@link ProcessChain#exergyChange} shows
  * it. Of the work, {@code p0 ΔV} goes into pushing back the surroundings; the rest is useful. In a cycle the two terms of

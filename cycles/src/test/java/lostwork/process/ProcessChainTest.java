@@ -273,12 +273,13 @@ class ProcessChainTest {
     /** A single expansion does more work than the cycle that returns; what it used up is the exergy of the mass. */
     @Test
     void oneWayExpansionDoesMoreWorkThanTheCycle() {
+        // The example of the package page, with its figures.
         final ClosedMass steam = ClosedMass.of(Water.industrial(), kilograms(0.2));
         final ProcessChain expansion = steam.startingAt(celsius(300), bar(10)).isentropicTo(bar(1.2));
-        final ProcessCycle cycle = expansion
-                .isobaricTo(Ratio.fraction(0.3))
-                .polytropicTo(expansion.start())
-                .closed();
+        final ProcessCycle cycle = expansion.isobaricTo(Ratio.fraction(0.3)).closedBy(ProcessKind.POLYTROPIC);
+        assertEquals(68.5, expansion.netWork().inKilojoules(), 0.05);
+        assertEquals(32.5, cycle.netWork().inKilojoules(), 0.05);
+        assertEquals(45.9, expansion.usefulWork(SITE).inKilojoules(), 0.05);
         assertFalse(expansion.closes());
         assertTrue(expansion.netWork().si() > cycle.netWork().si());
         assertTrue(expansion.exergyChange(SITE).si() < 0);
