@@ -348,6 +348,41 @@ class ProcessChainTest {
                 1e-6 * chain.end().volume().si());
     }
 
+    /** By Maxwell's equal areas, the work of the isotherm through the dome is that of the equation of state itself. */
+    @Test
+    void isothermThroughTheDomeDoesTheWorkOfMaxwell() {
+        final Fluid fluid = Fluid.of(new VanDerWaalsFluid());
+        for (double kelvin : new double[] {200, 250, 290, 303, 320}) {
+            final ProcessStep step = ClosedMass.of(fluid, kilograms(1))
+                    .startingAt(kelvin(kelvin), bar(150))
+                    .isothermalTo(bar(1))
+                    .lastStep();
+            final double work = VanDerWaalsFluid.isothermalWork(
+                    kelvin, step.from().volume().si(), step.to().volume().si());
+            assertEquals(work, step.work().si(), 1e-10 * work);
+            final double heat = kelvin * step.entropyChange().si();
+            assertEquals(heat, step.heat().si(), 1e-10 * heat);
+        }
+    }
+
+    /** Carnot's efficiency does not depend on the fluid: here it boils at 290 K and condenses at 220 K. */
+    @Test
+    void carnotCycleThroughTheDome() {
+        final Fluid fluid = Fluid.of(new VanDerWaalsFluid());
+        final FluidState liquid = fluid.state(kelvin(290), Ratio.fraction(0));
+        final ProcessCycle carnot = ClosedMass.of(fluid, kilograms(1))
+                .startingAt(liquid)
+                .isothermalTo(Ratio.fraction(1))
+                .isentropicTo(kelvin(220))
+                .isothermalTo(fluid.state(kelvin(220), liquid.entropy()).volume())
+                .closedBy(ProcessKind.ISENTROPIC);
+        assertEquals(1 - 220.0 / 290, carnot.thermalEfficiency().si(), 1e-10);
+        assertEquals(
+                carnot.netWork().si(),
+                carnot.pressureVolumeArea().si(),
+                1e-8 * carnot.netWork().si());
+    }
+
     /** From liquid under pressure to wet steam a polytrope takes heat in, then gives heat off. */
     @Test
     void polytropeThatTurnsCountsItsHeatInParts() {

@@ -72,6 +72,16 @@ final class VanDerWaalsFluid implements FluidModel, SaturationModel {
         return v;
     }
 
+    /**
+     * {@return ∫ p dv along an isotherm in J/kg, in closed form}
+     *
+     * <p>Through the two-phase region as well: the loop of the equation and the straight line at saturation pressure enclose
+     * equal areas (Maxwell), so that both have the same integral.
+     */
+    static double isothermalWork(double kelvin, double startVolume, double endVolume) {
+        return R * kelvin * Math.log((endVolume - B) / (startVolume - B)) + A / endVolume - A / startVolume;
+    }
+
     private static double series(double y) {
         double above = 0, below = 0, odd = y, four = 1;
         for (int k = 1; k < 60 && 2 * k * odd > 1e-17 * above; k++) {
