@@ -5,10 +5,8 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Deque;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import java.util.stream.IntStream;
 import lostwork.plant.kernel.BalanceRows;
 import lostwork.plant.kernel.Blocks;
@@ -164,22 +162,15 @@ final class Planner {
         }
         final Matching matching = new Matching(unknownsOf, unknownSlots.size());
         final List<Integer> surplus = new ArrayList<>();
-        final List<Equation> assumed = new ArrayList<>();
-        final List<Equation> gaveWay = new ArrayList<>();
         for (int e = 0; e < unknownsOf.length; e++) {
             if (!entries.get(e).isAssumption() && !matching.add(e)) {
                 surplus.add(e);
             }
         }
+        final Assumptions assumptions = new Assumptions(plant, entries, matching);
         for (int e = 0; e < unknownsOf.length; e++) {
-            if (entries.get(e).isAssumption()) {
-                if (matching.add(e)) {
-                    assumed.add(entries.get(e).equation());
-                } else if (isContradictedNearby(e, matching.overdetermined(e))) {
-                    gaveWay.add(entries.get(e).equation());
-                } else {
-                    surplus.add(e);
-                }
+            if (entries.get(e).isAssumption() && !assumptions.add(e)) {
+                surplus.add(e);
             }
         }
         final Diagnosis diagnosis =
@@ -192,30 +183,9 @@ final class Planner {
                 active,
                 entries,
                 order(unknownsOf, matching, unknownSlots),
-                assumed,
-                gaveWay,
+                assumptions.assumed(),
+                assumptions.gaveWay(),
                 redundant);
-    }
-
-    /**
-     * Whether the values that contradict an assumption stand at its own component: then it gives way. A contradiction that
-     * runs through other machines is no statement about this one, and must be settled by the user.
-     */
-    private boolean isContradictedNearby(int assumption, boolean[] part) {
-        final String component = entries.get(assumption).equation().component();
-        final Set<Integer> states = new HashSet<>();
-        layout.stateOf.forEach((port, state) -> {
-            if (port.component().equals(component)) {
-                states.add(state);
-            }
-        });
-        for (int e = 0; e < part.length; e++) {
-            final Entry entry = entries.get(e);
-            if (part[e] && !entry.equation().component().equals(component) && !states.contains(entry.state())) {
-                return false;
-            }
-        }
-        return true;
     }
 
     private EquationSystem order(int[][] unknownsOf, Matching matching, List<Integer> unknownSlots) {

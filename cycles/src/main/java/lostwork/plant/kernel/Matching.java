@@ -16,6 +16,13 @@ public final class Matching {
     private final int[] unknownOf;
     private final int[] equationOf;
     private final int[] visitedAt;
+    /** The alternating path that is searched, as an explicit stack: long chains do not overflow the call stack. */
+    private final int[] path;
+    /** For each equation of the path, how many of its unknowns have been looked at. */
+    private final int[] cursor;
+    /** For each equation of the path, the unknown that leads to the next one. */
+    private final int[] taken;
+
     private int visit;
 
     /**
@@ -29,6 +36,9 @@ public final class Matching {
         unknownOf = new int[unknownsOf.length];
         equationOf = new int[unknowns];
         visitedAt = new int[unknowns];
+        path = new int[unknowns + 1];
+        cursor = new int[unknowns + 1];
+        taken = new int[unknowns + 1];
         Arrays.fill(unknownOf, NONE);
         Arrays.fill(equationOf, NONE);
     }
@@ -41,27 +51,58 @@ public final class Matching {
      */
     public boolean add(int equation) {
         visit++;
-        return augment(equation);
-    }
-
-    private boolean augment(int equation) {
-        for (int unknown : unknownsOf[equation]) {
-            if (equationOf[unknown] == NONE && visitedAt[unknown] != visit) {
-                visitedAt[unknown] = visit;
-                match(equation, unknown);
+        int depth = 0;
+        path[0] = equation;
+        cursor[0] = 0;
+        while (depth >= 0) {
+            final int free = cursor[depth] == 0 ? freeUnknown(path[depth]) : NONE;
+            if (free != NONE) {
+                match(path[depth], free);
+                while (--depth >= 0) {
+                    match(path[depth], taken[depth]);
+                }
                 return true;
             }
-        }
-        for (int unknown : unknownsOf[equation]) {
-            if (visitedAt[unknown] != visit) {
-                visitedAt[unknown] = visit;
-                if (augment(equationOf[unknown])) {
-                    match(equation, unknown);
-                    return true;
-                }
+            final int next = unvisitedUnknown(path[depth], depth);
+            if (next == NONE) {
+                depth--;
+            } else {
+                visitedAt[next] = visit;
+                taken[depth++] = next;
+                path[depth] = equationOf[next];
+                cursor[depth] = 0;
             }
         }
         return false;
+    }
+
+    private int freeUnknown(int equation) {
+        for (int unknown : unknownsOf[equation]) {
+            if (equationOf[unknown] == NONE) {
+                return unknown;
+            }
+        }
+        return NONE;
+    }
+
+    private int unvisitedUnknown(int equation, int depth) {
+        while (cursor[depth] < unknownsOf[equation].length) {
+            final int unknown = unknownsOf[equation][cursor[depth]++];
+            if (visitedAt[unknown] != visit) {
+                return unknown;
+            }
+        }
+        return NONE;
+    }
+
+    /**
+     * Takes an equation out, so that its unknown is free for another one.
+     *
+     * @param equation an equation that is matched
+     */
+    public void remove(int equation) {
+        equationOf[unknownOf[equation]] = NONE;
+        unknownOf[equation] = NONE;
     }
 
     private void match(int equation, int unknown) {
