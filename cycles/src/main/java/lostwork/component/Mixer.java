@@ -23,7 +23,8 @@ import lostwork.plant.Outlet;
  * <p>It is adiabatic. All streams are assumed to meet at one pressure; for an inlet whose pressure is given besides that
  * of the outlet, the assumption gives way, and the step of pressure is a throttling inside the mixer. Where a stream
  * comes from a higher pressure, a {@link Valve} before the mixer says so more clearly. Where branches part in a
- * {@link Splitter} and meet again, all but one of them need such a valve: their pressure losses are not free.
+ * {@link Splitter} and meet again, the loss of one settles that of another that has none of its own; with a loss given for
+ * each, give the pressure at the outlet too, or put valves before the mixer.
  *
  * <p>Source: the first law of an adiabatic open system without work.
  */

@@ -1,9 +1,11 @@
 package lostwork.plant;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import lostwork.quantity.EntropyRate;
 
 /**
@@ -111,10 +113,12 @@ public final class Closure {
                         + EntropyRate.wattsPerKelvin(balance.generation()) + ")");
             }
         }
+        final Set<Integer> flows = new HashSet<>();
         for (Component component : solution.plant().components()) {
             component.variables().forEach(variable -> checkLimits(solution, variable, findings));
             for (Port port : component.ports()) {
-                if (port instanceof MaterialPort material) {
+                if (port instanceof MaterialPort material
+                        && flows.add(solution.plant().slotOf(material.flow()))) {
                     checkLimits(solution, material.flow(), findings);
                 }
             }

@@ -99,9 +99,7 @@ public abstract class Component {
      */
     protected final <Q extends ScalarQuantity<Q, ?>> Variable<Q> variable(
             String variableName, QuantityKind<Q, ?> kind) {
-        final Variable<Q> variable = new Variable<>(name, variableName, kind);
-        variables.add(variable);
-        return variable;
+        return add(new Variable<>(name, variableName, kind));
     }
 
     /**
@@ -118,9 +116,7 @@ public abstract class Component {
      */
     protected final <Q extends ScalarQuantity<Q, D>, D extends LinearQuantity<D>> Variable<Q> variable(
             String variableName, Q lowest, Q highest) {
-        final Variable<Q> variable = new Variable<>(name, variableName, lowest.kind(), lowest.si(), highest.si());
-        variables.add(variable);
-        return variable;
+        return add(new Variable<>(name, variableName, lowest.kind(), lowest.si(), highest.si()));
     }
 
     /**
@@ -195,7 +191,18 @@ public abstract class Component {
         return add(new HeatOutlet(name, portName));
     }
 
+    private <Q extends ScalarQuantity<Q, ?>> Variable<Q> add(Variable<Q> variable) {
+        if (variables.contains(variable)) {
+            throw new IllegalArgumentException(name + " already has a variable named \"" + variable.name() + "\"");
+        }
+        variables.add(variable);
+        return variable;
+    }
+
     private <P extends Port> P add(P port) {
+        if (ports.stream().anyMatch(other -> other.name().equals(port.name()))) {
+            throw new IllegalArgumentException(name + " already has a port named \"" + port.name() + "\"");
+        }
         ports.add(port);
         return port;
     }

@@ -127,7 +127,7 @@ public final class Equations {
      * @param value what it equals
      */
     public void define(String name, Variable<?> variable, Expression value) {
-        definitions.put(variable, new Equation(component, name, EquationTag.LAW, variable, value));
+        define(name, variable, variable, value);
     }
 
     /**
@@ -139,7 +139,13 @@ public final class Equations {
      * @param right the other side, of the same dimension
      */
     public void define(String name, Variable<?> variable, Expression left, Expression right) {
-        definitions.put(variable, new Equation(component, name, EquationTag.LAW, left, right));
+        final Equation equation = new Equation(component, name, EquationTag.LAW, left, right);
+        if (!equation.variables().contains(variable)) {
+            throw new IllegalArgumentException(equation + " does not contain " + variable + ", which it defines");
+        }
+        if (definitions.putIfAbsent(variable, equation) != null) {
+            throw new IllegalArgumentException(variable + " is defined twice by " + component);
+        }
     }
 
     /**

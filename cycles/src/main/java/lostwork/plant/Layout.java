@@ -50,6 +50,9 @@ final class Layout {
     final List<Slot> slots = new ArrayList<>();
     final List<SlotScale> scales = new ArrayList<>();
     final Map<Variable<?>, Integer> slotOf = new HashMap<>();
+    /** The plant's own variable of each name, which knows its limits. */
+    final Map<Variable<?>, Variable<?>> own = new HashMap<>();
+
     final Map<MaterialPort, Integer> stateOf = new LinkedHashMap<>();
     final Map<MaterialPort, Integer> flowSlotOf = new LinkedHashMap<>();
 
@@ -158,7 +161,13 @@ final class Layout {
         final int index = slots.size();
         slots.add(slot);
         scales.add(scaleOf(slot));
-        names.forEach(name -> slotOf.put(name, index));
+        for (Variable<?> name : names) {
+            if (slotOf.put(name, index) != null) {
+                throw new IllegalArgumentException(
+                        "two variables are named \"" + name + "\"; one may be that of a port");
+            }
+            own.put(name, name);
+        }
         return index;
     }
 

@@ -1,6 +1,7 @@
 package lostwork.plant;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -9,6 +10,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.NoSuchElementException;
+import java.util.Objects;
 import java.util.Set;
 import java.util.TreeMap;
 import lostwork.fluid.Fluid;
@@ -54,7 +56,9 @@ public final class Plant {
         final PortUnions unions = new PortUnions(ports);
         connections.forEach(c -> unions.connect(c.from(), c.to()));
         final List<Equation> stated = new ArrayList<>();
-        final Map<Variable<?>, Equation> defined = new LinkedHashMap<>();
+        // Sorted, so that the order of adding plays no part.
+        final Map<Variable<?>, Equation> defined = new TreeMap<>(
+                Comparator.<Variable<?>, String>comparing(Variable::component).thenComparing(Variable::name));
         final List<Equations.MassBalance> masses = new ArrayList<>();
         final List<Equations.Requirement> required = new ArrayList<>();
         for (Component component : components) {
@@ -68,11 +72,13 @@ public final class Plant {
         builder.definitions.forEach((variable, equation) -> defined.put(variable, equation));
         builder.media.forEach(unions::fluid);
         equations = List.copyOf(stated);
-        definitions = defined;
+        definitions = Collections.unmodifiableMap(defined);
         balances = List.copyOf(masses);
         requirements = List.copyOf(required);
         layout = Layout.of(components, ports, unions, builder.resolveFluids(ports, unions));
-        layout.addPlantVariables(builder.definitions.keySet());
+        layout.addPlantVariables(defined.keySet().stream()
+                .filter(builder.definitions::containsKey)
+                .toList());
         resolution = new Resolution() {
             @Override
             public FluidModel modelAt(MaterialPort port) {
@@ -129,8 +135,8 @@ public final class Plant {
                 return type.cast(component);
             }
         }
-        throw new NoSuchElementException("no " + type.getSimpleName() + " \"" + componentName + "\" in plant \"" + name
-                + "\"; its components are " + components);
+        throw new NoSuchElementException("plant \"" + name + "\" has no " + type.getSimpleName() + " \"" + componentName
+                + "\"; its components are " + Diagnosis.join(nearFirst(componentName, components)));
     }
 
     /**
@@ -144,9 +150,7 @@ public final class Plant {
      */
     public <Q extends ScalarQuantity<Q, ?>> Variable<Q> variable(
             String componentName, String variableName, QuantityKind<Q, ?> kind) {
-        final Variable<Q> variable = new Variable<>(componentName, variableName, kind);
-        slotOf(variable);
-        return variable;
+        return own(new Variable<>(componentName, variableName, kind));
     }
 
     /** {@return a specification of this plant in which nothing is given} */
@@ -174,9 +178,22 @@ public final class Plant {
         return requirements;
     }
 
+    /** The plant's own variable of the same name, with the limits that its component sets. */
+    @SuppressWarnings("unchecked") // the kinds are the same
+    <Q extends ScalarQuantity<Q, ?>> Variable<Q> own(Variable<Q> variable) {
+        slotOf(variable);
+        return (Variable<Q>) layout.own.get(variable);
+    }
+
     int slotOf(Variable<?> variable) {
+        Objects.requireNonNull(variable, "variable");
         final Integer slot = layout.slotOf.get(variable);
-        if (slot == null || layout.slots.get(slot).kind() != variable.kind()) {
+        if (slot != null && layout.slots.get(slot).kind() != variable.kind()) {
+            throw new NoSuchElementException("\"" + variable + "\" of plant \"" + name + "\" is a "
+                    + layout.slots.get(slot).kind().name() + ", not a "
+                    + variable.kind().name());
+        }
+        if (slot == null) {
             final List<String> names = layout.slotOf.keySet().stream()
                     .filter(v -> v.component().equals(variable.component()))
                     .map(Variable::name)
@@ -184,10 +201,32 @@ public final class Plant {
                     .toList();
             throw new NoSuchElementException("plant \"" + name + "\" has no variable \"" + variable + "\""
                     + (names.isEmpty()
-                            ? "; its components are " + components
-                            : "; the variables of " + variable.component() + " are " + names));
+                            ? "; its components are " + Diagnosis.join(nearFirst(variable.component(), components))
+                            : "; the variables of " + variable.component() + " are "
+                                    + Diagnosis.join(nearFirst(variable.name(), names))));
         }
         return slot;
+    }
+
+    /** Names in the order of how near they come to a misspelt one: by the pairs of neighbouring letters in common. */
+    private static List<?> nearFirst(String wanted, List<?> things) {
+        final Set<String> pairs = pairs(wanted);
+        return things.stream()
+                .sorted(Comparator.comparingDouble(thing -> {
+                    final Set<String> common = pairs(thing.toString());
+                    final int size = common.size() + pairs.size();
+                    common.retainAll(pairs);
+                    return size == 0 ? 0 : -2.0 * common.size() / size;
+                }))
+                .toList();
+    }
+
+    private static Set<String> pairs(String word) {
+        final Set<String> found = new LinkedHashSet<>();
+        for (int i = 1; i < word.length(); i++) {
+            found.add(word.substring(i - 1, i + 1));
+        }
+        return found;
     }
 
     /** {@return the plant as text: its components, connections and fluids} */
@@ -307,6 +346,9 @@ public final class Plant {
          * @return this builder
          */
         public Builder circuit(Fluid fluid, FlowPath... paths) {
+            if (paths.length == 0) {
+                throw new IllegalArgumentException("a circuit needs at least one way through a component");
+            }
             line(paths);
             connect(paths[paths.length - 1].outlet(), paths[0].inlet());
             return medium(paths[0].inlet(), fluid);

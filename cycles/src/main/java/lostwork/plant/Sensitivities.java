@@ -18,6 +18,9 @@ public final class Sensitivities {
     static Sensitivities of(Solution solution, Variable<?> of) {
         final Plant plant = solution.plant();
         final int slot = plant.slotOf(of);
+        if (!solution.hasValue(of)) {
+            throw new IllegalStateException(of + " has no value in this solution, so nothing to differentiate");
+        }
         final List<Variable<?>> given = solution.specification().givenVariables();
         // A variable that the solve did not need takes part in a plan of its own.
         final SolvePlan plan =

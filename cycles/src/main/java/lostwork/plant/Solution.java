@@ -79,11 +79,13 @@ public final class Solution {
     /**
      * {@return the state of the stream at a port}
      *
-     * @param port the port
+     * @param port the port, of this plant or of one with the same names
+     * @throws java.util.NoSuchElementException if the plant has no such port
      */
     public FluidState state(MaterialPort port) {
-        final Layout.StreamState state =
-                plant().layout().states.get(plant().layout().stateOf.get(port));
+        final Layout layout = plant().layout();
+        final Layout.StreamState state = layout.states.get(
+                layout.slots.get(plant().slotOf(port.pressure())).state());
         return state.fluid()
                 .state(
                         Pressure.pascal(values[state.slot(SlotRole.PRESSURE)]),
@@ -113,6 +115,7 @@ public final class Solution {
      * @param of a variable
      * @param to a variable that is given
      * @throws java.util.NoSuchElementException if {@code to} is not given
+     * @throws IllegalStateException if {@code of} has no value in this solution
      */
     public Sensitivity sensitivity(Variable<?> of, Variable<?> to) {
         return Sensitivities.of(this, of).to(to);
@@ -122,6 +125,7 @@ public final class Solution {
      * {@return the exact derivatives of one value with respect to everything that is given}
      *
      * @param of a variable
+     * @throws IllegalStateException if it has no value in this solution
      */
     public Sensitivities sensitivities(Variable<?> of) {
         return Sensitivities.of(this, of);

@@ -1,5 +1,6 @@
 package lostwork.plant;
 
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
@@ -21,6 +22,10 @@ import lostwork.quantity.OutOfRangeException;
  */
 public final class SolvePlan {
     private static final int MORE_SEARCHES = 8;
+    /** Scaled residual at or below which an equation is met. */
+    private static final double MET = 1e-9;
+    /** The longest time limit that the clock can hold; more is for ever. */
+    private static final Duration LONGEST = Duration.ofDays(36_500);
 
     private final Plant plant;
     private final List<Variable<?>> givenVariables;
@@ -107,7 +112,8 @@ public final class SolvePlan {
     }
 
     Solution solve(Specification specification, SolveOptions options) {
-        final long deadline = System.nanoTime() + options.limit().toNanos();
+        final Duration limit = options.limit().compareTo(LONGEST) < 0 ? options.limit() : LONGEST;
+        final long deadline = System.nanoTime() + limit.toNanos();
         Solution found = solveOnce(specification, options, deadline, 0);
         if (options.secondLaw() == SolveOptions.SecondLaw.REPORTED) {
             return found;
@@ -168,7 +174,7 @@ public final class SolvePlan {
                 solver.solveWarm();
             }
         } catch (BlockFailure failure) {
-            throw explain(failure, w);
+            throw explain(failure);
         }
         double largest = 0;
         for (int[] block : system.blocks()) {
@@ -222,7 +228,7 @@ public final class SolvePlan {
                 List.of());
     }
 
-    private PlantSolveException explain(BlockFailure failure, Workspace w) {
+    private PlantSolveException explain(BlockFailure failure) {
         final int[] block = failure.equations();
         final double[] residuals = failure.residuals();
         final List<Equation> worst = IntStream.range(0, block.length)
@@ -236,6 +242,7 @@ public final class SolvePlan {
         final String head = "plant \"" + plant.name() + "\": ";
         return switch (failure.reason()) {
             case SINGULAR -> singular(head, failure, unknowns);
+            case SATURATED -> saturated(head, block[0], unknowns);
             case OUT_OF_TIME ->
                 new PlantSolveException(
                         PlantSolveException.Reason.OUT_OF_TIME,
@@ -250,7 +257,7 @@ public final class SolvePlan {
                 new PlantSolveException(
                         PlantSolveException.Reason.NOT_MET,
                         head + "no values of " + Diagnosis.join(unknowns) + " within their bounds meet "
-                                + describeWorst(block, residuals, w)
+                                + describeWorst(block, residuals)
                                 + ". Check the given values that these equations use: "
                                 + Diagnosis.join(givenIn(block)),
                         worst,
@@ -258,15 +265,31 @@ public final class SolvePlan {
         };
     }
 
-    private String describeWorst(int[] block, double[] residuals, Workspace w) {
-        final List<String> parts = new ArrayList<>();
-        IntStream.range(0, block.length)
+    private String describeWorst(int[] block, double[] residuals) {
+        final List<Integer> missed = IntStream.range(0, block.length)
                 .boxed()
+                .filter(i -> !(residuals[i] <= MET))
                 .sorted(Comparator.comparingDouble(i -> -residuals[i]))
-                .limit(3)
-                .forEach(i -> parts.add("\"" + entries.get(block[i]).equation() + "\" (missed by "
-                        + String.format(Locale.ROOT, "%.1e", residuals[i]) + " of its scale)"));
-        return String.join(" and ", parts);
+                .toList();
+        return Diagnosis.join(missed.stream()
+                .map(i -> "\"" + entries.get(block[i]).equation().words() + "\" (missed by "
+                        + String.format(Locale.ROOT, "%.1g", residuals[i]) + " of its scale)")
+                .toList());
+    }
+
+    private PlantSolveException saturated(String head, int equation, List<Variable<?>> unknowns) {
+        final Layout.StreamState state =
+                plant.layout().states.get(Math.max(0, entries.get(equation).state()));
+        return new PlantSolveException(
+                PlantSolveException.Reason.UNDETERMINED,
+                head + "the given values do not determine " + Diagnosis.join(unknowns) + ": "
+                        + state.port().temperature() + " and " + state.port().pressure()
+                        + " lie on the saturation line of "
+                        + state.model().name()
+                        + ", where they do not tell liquid from vapour. Give the vapour fraction or the enthalpy there"
+                        + " instead of the temperature",
+                List.of(entries.get(equation).equation()),
+                unknowns);
     }
 
     private PlantSolveException singular(String head, BlockFailure failure, List<Variable<?>> unknowns) {
@@ -284,8 +307,9 @@ public final class SolvePlan {
         return new PlantSolveException(
                 PlantSolveException.Reason.UNDETERMINED,
                 head + "the given values do not determine " + Diagnosis.join(free) + ": "
-                        + Diagnosis.join(
-                                dependent.stream().map(e -> "\"" + e + "\"").toList())
+                        + Diagnosis.join(dependent.stream()
+                                .map(e -> "\"" + e.words() + "\"")
+                                .toList())
                         + (dependent.size() > 1 ? " say the same there" : " does not depend on it there")
                         + ". Give one of the former, and release one of "
                         + Diagnosis.join(givenIn(block)),
@@ -303,6 +327,21 @@ public final class SolvePlan {
             }
         }
         return found;
+    }
+
+    /** {@return the unknowns in the order of solving, a line a block} */
+    @Override
+    public String toString() {
+        final StringBuilder text = new StringBuilder("Solve plan of plant \"" + plant.name() + "\"\n");
+        for (int[] block : system.blocks()) {
+            text.append("  ")
+                    .append(Arrays.stream(block)
+                            .mapToObj(e -> variableOf(system.matched()[e]) + " from "
+                                    + entries.get(e).equation().words())
+                            .collect(java.util.stream.Collectors.joining("; ")))
+                    .append('\n');
+        }
+        return text.toString();
     }
 
     private Variable<?> variableOf(int slot) {

@@ -4,6 +4,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.NoSuchElementException;
+import java.util.Objects;
 import java.util.Optional;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.ScalarQuantity;
@@ -42,14 +43,14 @@ public final class Specification {
      * @throws NoSuchElementException if the plant has no such variable
      */
     public <Q extends ScalarQuantity<Q, ?>> Specification given(Variable<Q> variable, Q value) {
-        plant.slotOf(variable);
-        requirePossible(variable, value);
+        final Variable<Q> own = plant.own(variable);
+        requirePossible(own, value);
         if (given.containsKey(variable)) {
             throw new IllegalArgumentException(
                     variable + " is given already, as " + given.get(variable) + "; use with(...) to change its value");
         }
         final Map<Variable<?>, ScalarQuantity<?, ?>> more = new LinkedHashMap<>(given);
-        more.put(variable, value);
+        more.put(own, value);
         return new Specification(plant, more, null);
     }
 
@@ -63,7 +64,7 @@ public final class Specification {
      */
     public <Q extends ScalarQuantity<Q, ?>> Specification with(Variable<Q> variable, Q value) {
         requireGiven(variable);
-        requirePossible(variable, value);
+        requirePossible(plant.own(variable), value);
         final Map<Variable<?>, ScalarQuantity<?, ?>> changed = new LinkedHashMap<>(given);
         changed.put(variable, value);
         return new Specification(plant, changed, plan);
@@ -82,7 +83,26 @@ public final class Specification {
         return new Specification(plant, fewer, null);
     }
 
+    /**
+     * {@return the same given values for another plant that has variables of these names: one that was built anew, read
+     * from a file, or changed elsewhere}
+     *
+     * @param other the other plant
+     * @throws NoSuchElementException if the other plant lacks a variable that is given
+     * @throws OutOfRangeException if a value lies outside what the other plant allows
+     */
+    public Specification on(Plant other) {
+        final Map<Variable<?>, ScalarQuantity<?, ?>> moved = new LinkedHashMap<>();
+        given.forEach((variable, value) -> {
+            final Variable<?> own = other.own(variable);
+            requirePossible(own, value);
+            moved.put(own, value);
+        });
+        return new Specification(other, moved, null);
+    }
+
     private static void requirePossible(Variable<?> variable, ScalarQuantity<?, ?> value) {
+        Objects.requireNonNull(value, () -> "value of " + variable);
         if (!(value.si() >= variable.lowest() && value.si() <= variable.highest())) {
             throw new OutOfRangeException(
                     variable.toString(),

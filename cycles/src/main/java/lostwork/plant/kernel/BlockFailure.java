@@ -10,6 +10,8 @@ public final class BlockFailure extends RuntimeException {
         NOT_MET,
         /** The equations are met, but do not determine their unknowns. */
         SINGULAR,
+        /** Temperature and pressure of a state lie on the saturation line and do not tell liquid from vapour. */
+        SATURATED,
         /** The equations are met only outside the range of a fluid. */
         OUTSIDE_RANGE,
         /** The time limit ran out. */

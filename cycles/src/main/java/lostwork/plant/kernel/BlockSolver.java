@@ -35,6 +35,10 @@ public final class BlockSolver {
     private final StartValues starts;
     private final Limits limits;
     private final boolean[] known;
+    /** The block that is being solved. */
+    private int[] present = new int[0];
+
+    private int presentNumber;
 
     private double[] matrix = new double[0];
     private double[] step = new double[0];
@@ -82,7 +86,9 @@ public final class BlockSolver {
     private void solve(boolean warm) {
         int number = 0;
         for (int[] block : system.blocks()) {
-            checkLimits(number, block);
+            present = block;
+            presentNumber = number;
+            checkLimits();
             if (block.length == 1) {
                 solveSingle(number, block, warm);
             } else {
@@ -96,12 +102,14 @@ public final class BlockSolver {
         }
     }
 
-    private void checkLimits(int number, int[] block) {
-        if (limits.cancelled().getAsBoolean()) {
-            throw failure(BlockFailure.Reason.CANCELLED, number, block);
-        }
-        if (System.nanoTime() - limits.deadlineNanos() > 0) {
-            throw failure(BlockFailure.Reason.OUT_OF_TIME, number, block);
+    /** Ends the solve when the caller wants it or the time is over; asked before each step that may take long. */
+    private void checkLimits() {
+        final BlockFailure.Reason reason = limits.cancelled().getAsBoolean()
+                ? BlockFailure.Reason.CANCELLED
+                : System.nanoTime() - limits.deadlineNanos() > 0 ? BlockFailure.Reason.OUT_OF_TIME : null;
+        if (reason != null) {
+            throw new BlockFailure(
+                    reason, presentNumber, present.clone(), new double[present.length], new double[0], new double[0]);
         }
     }
 
@@ -129,18 +137,19 @@ public final class BlockSolver {
         final Tape tape = system.equations().get(equation);
         final int place = tape.placeOf(slot);
         if (tape.isAffineIn(place)) {
-            if (!warm) {
-                w.x[slot] = 0;
-            }
+            w.x[slot] = 0; // also in a warm start, which then gives the same bits as a cold one
             final double residual = tape.evaluate(w);
             final double slope = w.gradient[place];
             w.x[slot] -= residual / slope;
-            if (!(Math.abs(slope) * scale(slot) > SINGULAR * rowScale(tape)) || tape.isAmbiguous(w)) {
+            if (tape.isAmbiguous(w)) {
+                throw failure(BlockFailure.Reason.SATURATED, number, block);
+            }
+            if (!(Math.abs(slope) * scale(slot) > SINGULAR * rowScale(tape))) {
                 throw singular(number, block, new double[] {1}, new double[] {1});
             }
             return;
         }
-        if (!warm) {
+        if (!warm || Double.isNaN(w.x[slot])) {
             starts.prepare(new int[] {slot}, known, w);
         }
         final double start = w.x[slot];
@@ -166,6 +175,7 @@ public final class BlockSolver {
         double bestAt = u;
         int stuck = 0;
         for (int i = 0; i < SINGLE_ITERATIONS; i++) {
+            checkLimits();
             w.x[slot] = u;
             final double r = tape.evaluate(w);
             final double slope = w.gradient[place];
@@ -241,6 +251,7 @@ public final class BlockSolver {
         final double[] at = new double[SCAN_POINTS];
         final double[] r = new double[SCAN_POINTS];
         for (int i = 0; i < SCAN_POINTS; i++) {
+            checkLimits();
             at[i] = pointBetween(bounds, (double) i / (SCAN_POINTS - 1));
             w.x[slot] = at[i];
             r[i] = tape.forward(w);
@@ -279,6 +290,7 @@ public final class BlockSolver {
         double best = Double.POSITIVE_INFINITY;
         double bestAt = u;
         for (int i = 0; i < 4 * SINGLE_ITERATIONS; i++) {
+            checkLimits();
             w.x[slot] = u;
             final double r = tape.evaluate(w);
             final double slope = w.gradient[place];
@@ -312,7 +324,7 @@ public final class BlockSolver {
         final int n = block.length;
         final int[] slots = slotsOf(block);
         reserve(n);
-        if (warm && iterate(number, block, slots)) {
+        if (warm && iterate(block, slots)) {
             finishLoop(number, block, slots);
             return;
         }
@@ -334,12 +346,12 @@ public final class BlockSolver {
                 sweep(block, slots);
                 sweep(block, slots);
             }
-            final boolean met = iterate(number, block, slots);
+            final boolean met = iterate(block, slots);
             if (met && (!isOutside(block) || attempt == limits.restarts())) {
                 finishLoop(number, block, slots);
                 return;
             }
-            if (attempt == 0 && solveTorn(number, block, slots, first) && !isOutside(block)) {
+            if (attempt == 0 && solveTorn(block, slots, first) && !isOutside(block)) {
                 finishLoop(number, block, slots);
                 return;
             }
@@ -359,13 +371,13 @@ public final class BlockSolver {
     }
 
     /** Cuts the loop open at one unknown, looks for a change of sign over its whole range, and polishes what it finds. */
-    private boolean solveTorn(int number, int[] block, int[] slots, double[] start) {
+    private boolean solveTorn(int[] block, int[] slots, double[] start) {
         for (Tearing cut : Tearing.of(system, block)) {
-            checkLimits(number, block);
+            checkLimits();
             for (int j = 0; j < slots.length; j++) {
                 w.x[slots[j]] = start[j];
             }
-            if (scanCut(cut, w.x[cut.slot()]) && iterate(number, block, slots)) {
+            if (scanCut(cut, w.x[cut.slot()]) && iterate(block, slots)) {
                 return true;
             }
         }
@@ -424,6 +436,7 @@ public final class BlockSolver {
 
     /** The residual that is left when the loop is cut at a value and all other unknowns follow from it. */
     private double residualOfCut(Tearing cut, double value) {
+        checkLimits();
         w.x[cut.slot()] = value;
         for (int i = 0; i < cut.slots().length; i++) {
             final Tape tape = system.equations().get(cut.equations()[i]);
@@ -476,6 +489,7 @@ public final class BlockSolver {
     /** One Gauss–Seidel sweep: each equation is solved for its own unknown where that is easy. */
     private void sweep(int[] block, int[] slots) {
         for (int i = 0; i < block.length; i++) {
+            checkLimits();
             final Tape tape = system.equations().get(block[i]);
             final int slot = slots[i];
             final int place = tape.placeOf(slot);
@@ -494,12 +508,11 @@ public final class BlockSolver {
     }
 
     /** Damped Newton iteration; true when it has converged. */
-    private boolean iterate(int number, int[] block, int[] slots) {
+    private boolean iterate(int[] block, int[] slots) {
         final int n = block.length;
         double norm = evaluateLoop(block, slots);
         int polished = 0;
         for (int iteration = 0; iteration < NEWTON_ITERATIONS; iteration++) {
-            checkLimits(number, block);
             if (!Double.isFinite(norm) || !isFinite(n)) {
                 return false;
             }
@@ -516,6 +529,7 @@ public final class BlockSolver {
             double next = Double.NaN;
             boolean lower = false;
             for (int cut = 0; cut < 12 && !lower; cut++) {
+                checkLimits();
                 move(slots, damping);
                 next = residualNorm(block, rowScale);
                 lower = next < norm * (1 - 1e-4 * damping);

@@ -102,15 +102,17 @@ public final class Workspace {
     }
 
     /**
-     * {@return the value of a slot at which an equation holds that is affine in it; NaN when the equation does not depend
-     * on it}
+     * {@return the value of a slot at which an equation holds that is affine in it; NaN when the equation does not settle
+     * it}
      *
      * @param tape the equation
      * @param slot the slot
      */
     public double solveAffine(Tape tape, int slot) {
         final double residual = tape.evaluate(this);
-        return x[slot] - residual / gradient[tape.placeOf(slot)];
+        final int place = tape.placeOf(slot);
+        final double solved = place < 0 ? Double.NaN : x[slot] - residual / gradient[place];
+        return Double.isFinite(solved) ? solved : Double.NaN;
     }
 
     /**
