@@ -1,5 +1,9 @@
 package lostwork.plant;
 
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import lostwork.fluid.FluidState;
 import lostwork.quantity.EntropyRate;
@@ -162,6 +166,25 @@ public final class Solution {
     /** {@return the value of each requirement of the plant, in its order; NaN where it has none} */
     double[] requirements() {
         return completed().requirements();
+    }
+
+    /** {@return the solution as JSON: streams, values with their units, assumptions, closure and findings} */
+    public String toJson() {
+        return SolutionText.toJson(this);
+    }
+
+    /**
+     * Writes the streams and the values as CSV, one table after the other with an empty line between.
+     *
+     * @param file the file to write, in UTF-8; replaced when it exists
+     * @throws IOException if the file cannot be written
+     */
+    public void writeCsv(Path file) throws IOException {
+        Files.writeString(
+                file,
+                SolutionText.streams(this).toCsv() + "\n"
+                        + SolutionText.values(this).toCsv(),
+                StandardCharsets.UTF_8);
     }
 
     /** {@return the solution as text: states, machines, assumptions and closure} */

@@ -11,6 +11,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
@@ -32,6 +35,7 @@ import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Pressure;
 import lostwork.quantity.Ratio;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 
 /** What a solve promises beside its values: threads, warm starts, limits, names, and that a specification outlives a plant. */
 class SolveContractTest {
@@ -272,6 +276,20 @@ class SolveContractTest {
         assertThrows(
                 IllegalStateException.class,
                 () -> wet.sensitivity(line.turbine.outlet().superheat(), line.steam.pressure()));
+    }
+
+    @Test
+    void aSolutionIsStoredAsJsonAndAsCsv(@TempDir Path folder) throws IOException {
+        final Solution s = new Line().design.solve();
+        final String json = s.toJson();
+        assertTrue(json.contains("\"stream\": \"steam outlet → turbine inlet\""), json);
+        assertTrue(json.contains("\"variable\": \"isentropic efficiency\""), json);
+        assertTrue(json.contains("\"largest scaled residual\""), json);
+        final Path file = folder.resolve("line.csv");
+        s.writeCsv(file);
+        final List<String> lines = Files.readAllLines(file);
+        assertTrue(lines.get(0).startsWith("stream,fluid,flow in kg/s,temperature in °C"), lines.get(0));
+        assertTrue(lines.stream().anyMatch(l -> l.startsWith("turbine,isentropic efficiency,0.8,")), lines.toString());
     }
 
     @Test
