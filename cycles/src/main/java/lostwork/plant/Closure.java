@@ -1,11 +1,7 @@
 package lostwork.plant;
 
-import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import lostwork.quantity.EntropyRate;
 
 /**
@@ -13,12 +9,6 @@ import lostwork.quantity.EntropyRate;
  * evidence that does not use the equations that were solved. Immutable.
  */
 public final class Closure {
-    /** The share of the largest entropy flow below which a negative entropy generation is rounding. */
-    private static final double ROUNDING = 1e-9;
-
-    /** How far below zero a requirement is rounding, in its coherent SI unit. */
-    private static final double REQUIREMENT_ROUNDING = 1e-7;
-
     /** The entropy balance of one component. */
     record EntropyBalance(double generation, double largestFlow) {}
 
@@ -99,57 +89,6 @@ public final class Closure {
             largest = Math.max(largest, Math.abs(flow));
         }
         return new EntropyBalance(generation, largest);
-    }
-
-    static List<String> violations(Solution solution) {
-        final List<String> findings = new ArrayList<>();
-        for (Component component : solution.plant().components()) {
-            if (component.isBoundary() || heatOfUnknownTemperature(solution, component)) {
-                continue;
-            }
-            final EntropyBalance balance = entropyGeneration(solution, component);
-            if (balance.generation() < -ROUNDING * balance.largestFlow()) {
-                findings.add(component.name() + " would destroy entropy ("
-                        + EntropyRate.wattsPerKelvin(balance.generation()) + ")");
-            }
-        }
-        final Set<Integer> flows = new HashSet<>();
-        for (Component component : solution.plant().components()) {
-            component.variables().forEach(variable -> checkLimits(solution, variable, findings));
-            for (Port port : component.ports()) {
-                if (port instanceof MaterialPort material
-                        && flows.add(solution.plant().slotOf(material.flow()))) {
-                    checkLimits(solution, material.flow(), findings);
-                }
-            }
-        }
-        final double[] requirements = solution.requirements();
-        for (int i = 0; i < requirements.length; i++) {
-            if (requirements[i] < -REQUIREMENT_ROUNDING) {
-                final Equations.Requirement requirement =
-                        solution.plant().requirements().get(i);
-                findings.add(requirement.component() + ": " + requirement.words() + " is not met (by "
-                        + (float) -requirements[i] + ")");
-            }
-        }
-        return findings;
-    }
-
-    private static void checkLimits(Solution solution, Variable<?> variable, List<String> findings) {
-        final int slot = solution.plant().slotOf(variable);
-        if (!solution.plan().isActive(slot)) {
-            return; // a defined variable that nothing asked for
-        }
-        final double value = solution.si(slot);
-        final double room = ROUNDING * Math.max(1, Math.abs(value));
-        if (value < variable.lowest() - room || value > variable.highest() + room) {
-            findings.add(variable + " would have to be " + solution.value(variable));
-        }
-    }
-
-    private static boolean heatOfUnknownTemperature(Solution solution, Component component) {
-        return component.ports().stream()
-                .anyMatch(port -> port instanceof HeatPort heat && !solution.hasValue(heat.temperature()));
     }
 
     private static double si(Solution solution, Variable<?> variable) {

@@ -20,10 +20,11 @@ import org.jspecify.annotations.Nullable;
 final class Completion {
     private final SolvePlan plan;
     private final Layout layout;
-    private final CallSites sites = new CallSites();
     private final Map<Integer, Tape> definitions = new HashMap<>();
     private final List<Tape> requirements = new ArrayList<>();
-    private final List<Tape> tapes = new ArrayList<>();
+    // Definitions hold path integrals and other functions with much scratch; requirements, read in every solve, few.
+    private final CallSites definitionSites = new CallSites();
+    private final CallSites requirementSites = new CallSites();
 
     Completion(SolvePlan plan) {
         this.plan = plan;
@@ -31,21 +32,19 @@ final class Completion {
         final Plant plant = plan.plant();
         plant.definitions().forEach((variable, definition) -> {
             if (!plan.isActive(plant.slotOf(variable))) {
-                definitions.put(plant.slotOf(variable), compile(definition.left(), definition.right()));
+                definitions.put(plant.slotOf(variable), compile(definition.left(), definition.right(), definitionSites));
             }
         });
         for (Equations.Requirement requirement : plant.requirements()) {
-            requirements.add(compile(requirement.notNegative(), requirement.notNegative()));
+            requirements.add(compile(requirement.notNegative(), requirement.notNegative(), requirementSites));
         }
     }
 
-    private Tape compile(Expression left, Expression right) {
+    private Tape compile(Expression left, Expression right, CallSites sites) {
         final Tape.Builder b = new Tape.Builder(sites);
         final int l = left.emit(b, plan.plant().resolution());
         final int r = right.emit(b, plan.plant().resolution());
-        final Tape tape = b.build(l, r);
-        tapes.add(tape);
-        return tape;
+        return b.build(l, r);
     }
 
     /**
@@ -62,7 +61,8 @@ final class Completion {
     final class Values {
         private final double[] all;
         private final boolean[] tried;
-        private @Nullable Workspace workspace;
+        private @Nullable Workspace forDefinitions;
+        private @Nullable Workspace forRequirements;
 
         private Values(double[] values) {
             all = new double[layout.slots.size()];
@@ -81,8 +81,9 @@ final class Completion {
             if (Double.isNaN(all[slot]) && !tried[slot]) {
                 tried[slot] = true; // also ends a circle of definitions
                 final Tape definition = definitions.get(slot);
-                if (definition != null && prepare(definition, slot)) {
-                    final Workspace w = workspace();
+                if (definition != null && isReady(definition, slot)) {
+                    final Workspace w = forDefinitions();
+                    prepare(definition, slot, w);
                     w.set(slot, 0);
                     final double value = w.solveAffine(definition, slot);
                     all[slot] = definition.isOutside(w) ? Double.NaN : value;
@@ -96,35 +97,50 @@ final class Completion {
             final double[] result = new double[requirements.size()];
             Arrays.fill(result, Double.NaN);
             for (int i = 0; i < result.length; i++) {
-                if (prepare(requirements.get(i), -1)) {
-                    result[i] = workspace().leftSide(requirements.get(i));
+                if (isReady(requirements.get(i), -1)) {
+                    final Workspace w = forRequirements();
+                    prepare(requirements.get(i), -1, w);
+                    result[i] = w.leftSide(requirements.get(i));
                 }
             }
             return result;
         }
 
-        private Workspace workspace() {
-            Workspace w = workspace;
+        private Workspace forDefinitions() {
+            Workspace w = forDefinitions;
             if (w == null) {
-                w = new Workspace(all.length, tapes, sites);
-                workspace = w;
+                w = new Workspace(all.length, definitions.values(), definitionSites);
+                forDefinitions = w;
             }
             return w;
         }
 
-        /** Sets the slots that an equation uses, one excepted; false when one of them has no value. */
-        private boolean prepare(Tape tape, int except) {
+        private Workspace forRequirements() {
+            Workspace w = forRequirements;
+            if (w == null) {
+                w = new Workspace(all.length, requirements, requirementSites);
+                forRequirements = w;
+            }
+            return w;
+        }
+
+        /** {@return whether all slots that an equation uses, one excepted, have a value} */
+        private boolean isReady(Tape tape, int except) {
             for (int k = 0; k < tape.size(); k++) {
-                final int slot = tape.slot(k);
-                if (slot != except) {
-                    final double value = get(slot);
-                    if (Double.isNaN(value)) {
-                        return false;
-                    }
-                    workspace().set(slot, value);
+                if (tape.slot(k) != except && Double.isNaN(get(tape.slot(k)))) {
+                    return false;
                 }
             }
             return true;
+        }
+
+        /** Sets the slots that an equation uses, one excepted. */
+        private void prepare(Tape tape, int except, Workspace w) {
+            for (int k = 0; k < tape.size(); k++) {
+                if (tape.slot(k) != except) {
+                    w.set(tape.slot(k), get(tape.slot(k)));
+                }
+            }
         }
     }
 

@@ -137,7 +137,7 @@ public final class Solution {
 
     /** {@return what no real machine could do in this solution, in words; empty when all is well} */
     public List<String> violations() {
-        return Closure.violations(this);
+        return plan.checks().findings(this);
     }
 
     /** {@return the value of a slot, NaN where there is none} */

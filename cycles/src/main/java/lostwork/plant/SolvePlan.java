@@ -29,6 +29,7 @@ public final class SolvePlan {
 
     private final Plant plant;
     private final List<Variable<?>> givenVariables;
+    private final int[] givenSlots;
     private final boolean[] given;
     private final boolean[] active;
     private final List<Planner.Entry> entries;
@@ -38,6 +39,7 @@ public final class SolvePlan {
     private final List<Equation> redundant;
     private final NeighbourStarts starts;
     private final Completion completion;
+    private final SolutionChecks checks;
 
     SolvePlan(
             Plant plant,
@@ -51,6 +53,7 @@ public final class SolvePlan {
             List<Equation> redundant) {
         this.plant = plant;
         this.givenVariables = List.copyOf(givenVariables);
+        givenSlots = givenVariables.stream().mapToInt(plant::slotOf).toArray();
         this.given = given;
         this.active = active;
         this.entries = List.copyOf(entries);
@@ -60,6 +63,7 @@ public final class SolvePlan {
         this.redundant = List.copyOf(redundant);
         starts = new NeighbourStarts(plant, entries, given);
         completion = new Completion(this);
+        checks = new SolutionChecks(this);
     }
 
     /** {@return the plant} */
@@ -93,6 +97,10 @@ public final class SolvePlan {
 
     boolean isGiven(int slot) {
         return given[slot];
+    }
+
+    SolutionChecks checks() {
+        return checks;
     }
 
     Completion completion() {
@@ -153,8 +161,8 @@ public final class SolvePlan {
 
     private Solution solveOnce(Specification specification, SolveOptions options, long deadline, int search) {
         final Workspace w = system.workspace(List.of());
-        for (Variable<?> variable : givenVariables) {
-            w.set(plant.slotOf(variable), specification.si(variable));
+        for (int i = 0; i < givenSlots.length; i++) {
+            w.set(givenSlots[i], specification.si(givenVariables.get(i)));
         }
         final int blocks = Math.max(1, system.blocks().size());
         final Limits limits = new Limits(
