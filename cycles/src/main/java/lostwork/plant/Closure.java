@@ -9,9 +9,6 @@ import lostwork.quantity.EntropyRate;
  * evidence that does not use the equations that were solved. Immutable.
  */
 public final class Closure {
-    /** The entropy balance of one component. */
-    record EntropyBalance(double generation, double largestFlow) {}
-
     private final double mass;
     private final double energy;
     private final Map<Component, EntropyRate> generation;
@@ -50,10 +47,7 @@ public final class Closure {
             if (!boundary) {
                 mass = Math.max(mass, Math.abs(massGap));
                 energy = Math.max(energy, Math.abs(energyGap));
-                generation.put(
-                        component,
-                        EntropyRate.wattsPerKelvin(
-                                entropyGeneration(solution, component).generation()));
+                generation.put(component, EntropyRate.wattsPerKelvin(entropyGeneration(solution, component)));
             }
         }
         return new Closure(
@@ -72,9 +66,8 @@ public final class Closure {
         return sign * si(solution, ((HeatPort) port).rate());
     }
 
-    static EntropyBalance entropyGeneration(Solution solution, Component component) {
+    static double entropyGeneration(Solution solution, Component component) {
         double generation = 0;
-        double largest = 0;
         for (Port port : component.ports()) {
             double flow = 0;
             if (port instanceof MaterialPort material) {
@@ -86,9 +79,8 @@ public final class Closure {
                 }
             }
             generation += flow;
-            largest = Math.max(largest, Math.abs(flow));
         }
-        return new EntropyBalance(generation, largest);
+        return generation;
     }
 
     private static double si(Solution solution, Variable<?> variable) {

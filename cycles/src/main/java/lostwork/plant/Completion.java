@@ -32,7 +32,8 @@ final class Completion {
         final Plant plant = plan.plant();
         plant.definitions().forEach((variable, definition) -> {
             if (!plan.isActive(plant.slotOf(variable))) {
-                definitions.put(plant.slotOf(variable), compile(definition.left(), definition.right(), definitionSites));
+                definitions.put(
+                        plant.slotOf(variable), compile(definition.left(), definition.right(), definitionSites));
             }
         });
         for (Equations.Requirement requirement : plant.requirements()) {

@@ -109,8 +109,7 @@ public final class Solution {
      * @param component a component of the plant
      */
     public EntropyRate entropyGeneration(Component component) {
-        return EntropyRate.wattsPerKelvin(
-                Closure.entropyGeneration(this, component).generation());
+        return EntropyRate.wattsPerKelvin(Closure.entropyGeneration(this, component));
     }
 
     /**

