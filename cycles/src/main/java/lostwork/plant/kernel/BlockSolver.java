@@ -28,6 +28,7 @@ public final class BlockSolver {
 
     private static final int SINGLE_ITERATIONS = 60;
     private static final int SCAN_POINTS = 48;
+    private static final int NEAR_POINTS = 10;
     private static final int NEWTON_ITERATIONS = 80;
 
     private final EquationSystem system;
@@ -248,15 +249,14 @@ public final class BlockSolver {
     /** Looks for a change of sign over the whole range, nearest to the start first, and iterates from there. */
     private boolean scan(Tape tape, int place, int slot, double start) {
         final SlotScale bounds = system.scales().get(slot);
-        final double[] at = new double[SCAN_POINTS];
-        final double[] r = new double[SCAN_POINTS];
-        for (int i = 0; i < SCAN_POINTS; i++) {
+        final double[] at = scanPoints(bounds, start);
+        final double[] r = new double[at.length];
+        for (int i = 0; i < at.length; i++) {
             checkLimits();
-            at[i] = pointBetween(bounds, (double) i / (SCAN_POINTS - 1));
             w.x[slot] = at[i];
             r[i] = tape.forward(w);
         }
-        final Integer[] order = new Integer[SCAN_POINTS - 1];
+        final Integer[] order = new Integer[at.length - 1];
         Arrays.setAll(order, i -> i);
         Arrays.sort(order, (a, b) -> Double.compare(Math.abs(at[a] - start), Math.abs(at[b] - start)));
         final int wanted = limits.search();
@@ -275,11 +275,23 @@ public final class BlockSolver {
         return roots > 0;
     }
 
-    private static double pointBetween(SlotScale bounds, double share) {
-        if (bounds.proportional() && bounds.lowest() > 0) {
-            return Math.exp(Math.log(bounds.lowest()) * (1 - share) + Math.log(bounds.highest()) * share);
+    /** Points over the whole range, and more of them around the start, where roots may lie close to each other. */
+    private static double[] scanPoints(SlotScale bounds, double start) {
+        final double[] points = new double[SCAN_POINTS + 2 * NEAR_POINTS];
+        for (int i = 0; i < SCAN_POINTS; i++) {
+            final double share = i / (SCAN_POINTS - 1.0);
+            points[i] = bounds.proportional() && bounds.lowest() > 0
+                    ? Math.exp(Math.log(bounds.lowest()) * (1 - share) + Math.log(bounds.highest()) * share)
+                    : bounds.lowest() * (1 - share) + bounds.highest() * share;
         }
-        return bounds.lowest() * (1 - share) + bounds.highest() * share;
+        final double size = bounds.at(start);
+        for (int i = 0; i < NEAR_POINTS; i++) {
+            final double distance = size * Math.pow(10, -0.5 * i);
+            points[SCAN_POINTS + 2 * i] = bounds.clamp(start - distance);
+            points[SCAN_POINTS + 2 * i + 1] = bounds.clamp(start + distance);
+        }
+        Arrays.sort(points);
+        return points;
     }
 
     /** Newton inside a bracket that is known to hold a change of sign, with bisection where Newton leaves it. */
@@ -334,6 +346,11 @@ public final class BlockSolver {
             first[j] = system.scales().get(slots[j]).clamp(w.x[slots[j]]);
         }
         final SplittableRandom random = new SplittableRandom((limits.seed() * 31 + number) * 31 + limits.search());
+        // A later search wants another solution: the scan of a cut loop finds them all.
+        if (limits.search() > 0 && solveTorn(block, slots, first)) {
+            finishLoop(number, block, slots);
+            return;
+        }
         double[] bestStart = first;
         double bestResidual = Double.POSITIVE_INFINITY;
         for (int attempt = 0; attempt <= limits.restarts(); attempt++) {
@@ -351,7 +368,7 @@ public final class BlockSolver {
                 finishLoop(number, block, slots);
                 return;
             }
-            if (attempt == 0 && solveTorn(block, slots, first) && !isOutside(block)) {
+            if (attempt == 0 && limits.search() == 0 && solveTorn(block, slots, first)) {
                 finishLoop(number, block, slots);
                 return;
             }
@@ -377,7 +394,7 @@ public final class BlockSolver {
             for (int j = 0; j < slots.length; j++) {
                 w.x[slots[j]] = start[j];
             }
-            if (scanCut(cut, w.x[cut.slot()]) && iterate(block, slots)) {
+            if (scanCut(cut, w.x[cut.slot()]) && iterate(block, slots) && !isOutside(block)) {
                 return true;
             }
         }
@@ -386,13 +403,12 @@ public final class BlockSolver {
 
     private boolean scanCut(Tearing cut, double start) {
         final SlotScale bounds = system.scales().get(cut.slot());
-        final double[] at = new double[SCAN_POINTS];
-        final double[] r = new double[SCAN_POINTS];
-        for (int i = 0; i < SCAN_POINTS; i++) {
-            at[i] = pointBetween(bounds, (double) i / (SCAN_POINTS - 1));
+        final double[] at = scanPoints(bounds, start);
+        final double[] r = new double[at.length];
+        for (int i = 0; i < at.length; i++) {
             r[i] = residualOfCut(cut, at[i]);
         }
-        final Integer[] order = new Integer[SCAN_POINTS - 1];
+        final Integer[] order = new Integer[at.length - 1];
         Arrays.setAll(order, i -> i);
         Arrays.sort(order, (a, b) -> Double.compare(Math.abs(at[a] - start), Math.abs(at[b] - start)));
         int roots = 0;
