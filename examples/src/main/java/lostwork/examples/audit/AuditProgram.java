@@ -14,6 +14,7 @@ import java.util.function.LongSupplier;
 import lostwork.examples.audit.OutputFolder.Content;
 import lostwork.examples.recovery.RecoveryDesign;
 import lostwork.fluid.FlashException;
+import lostwork.ledger.Ledger;
 import lostwork.solve.SolveException;
 
 /** The audit from the arguments to the files, without the process around it. */
@@ -24,6 +25,9 @@ final class AuditProgram {
 
     private static final String BUNDLED_SURVEY = "glassworks-survey.csv";
     private static final String BUNDLED_SITE = "glassworks-site.txt";
+
+    private static final List<String> RECOVERY_FILES = List.of(
+            "plant.json", "plant-states.csv", "plant-machines.csv", "plant-pressures.csv", "ledger.csv", "ledger.json");
 
     private final PrintStream out;
     private final PrintStream err;
@@ -82,28 +86,33 @@ final class AuditProgram {
         files.put("report.txt", Content.of(report));
         files.put("streams.csv", Content.of(StreamCsv.of(result)));
         files.put("streams.json", Content.of(StreamJson.of(result)));
-        recovery.proposal().ifPresent(proposal -> putRecovery(files, result, proposal));
+        recovery.proposal().ifPresent(proposal -> files.putAll(recoveryFiles(result, proposal)));
         if (arguments.survey().isEmpty()) {
             files.put("example-survey.csv", Content.of(bundledText(BUNDLED_SURVEY)));
         }
         if (arguments.site().isEmpty()) {
             files.put("example-site.txt", Content.of(bundledText(BUNDLED_SITE)));
         }
+        folder.remove(RECOVERY_FILES);
         folder.write(files);
         out.print(report);
         out.println();
-        out.println("Written to " + folder.path() + ": " + String.join(", ", files.keySet()));
+        out.println("Written to " + folder.path() + ":");
+        out.println("  " + Paragraph.wrap(String.join(", ", files.keySet())));
         return result.problems().isEmpty() ? ALL_GOOD : SOME_LINES_REFUSED;
     }
 
-    private static void putRecovery(Map<String, Content> files, AuditResult result, RecoveryProposal proposal) {
+    private static Map<String, Content> recoveryFiles(AuditResult result, RecoveryProposal proposal) {
         final RecoveryTables tables = new RecoveryTables(proposal);
+        final Ledger ledger = proposal.recovery().ledger();
+        final Map<String, Content> files = new LinkedHashMap<>();
         files.put("plant.json", Content.of(RecoveryJson.of(result, proposal)));
         files.put("plant-states.csv", Content.of(tables.states().toCsv()));
         files.put("plant-machines.csv", Content.of(tables.machines().toCsv()));
         files.put("plant-pressures.csv", Content.of(tables.pressures().toCsv()));
-        files.put("ledger.csv", proposal.recovery().ledger()::writeCsv);
-        files.put("ledger.json", proposal.recovery().ledger()::writeJson);
+        files.put("ledger.csv", ledger::writeCsv);
+        files.put("ledger.json", ledger::writeJson);
+        return files;
     }
 
     private AuditResult compute(Site site, Survey survey) {

@@ -165,6 +165,7 @@ final class AuditReport {
         paragraphs(
                 "How the figures are made",
                 List.of(
+                        AuditRules.MEDIUM,
                         AuditRules.HEAT,
                         AuditRules.EXERGY,
                         AuditRules.MOST_WORK,

@@ -5,6 +5,10 @@ final class AuditRules {
     static final String HEAT = "Heat: what the stream gives off between its supply temperature and its lowest allowed"
             + " temperature, at its own pressure and without condensation; m (h1 - h2).";
 
+    static final String MEDIUM =
+            "Medium: air 1.61 means that 1.61 times the air of complete combustion burnt the fuel; g/kg"
+                    + " is the mass of water vapour per mass of dry air.";
+
     static final String EXERGY =
             "Exergy: the flow exergy of the stream as it leaves, m (h1 - h0 - T0 (s1 - s0)), against"
                     + " the ambient of the site, composition kept. It counts what lies below the lowest allowed temperature too.";

@@ -1,6 +1,7 @@
 package lostwork.examples.audit;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
 import java.math.RoundingMode;
 
 /** Prints numbers with a decimal point whatever the locale of the machine. */
@@ -11,6 +12,14 @@ final class Decimals {
     static String fixed(double value, int digits) {
         final BigDecimal rounded = new BigDecimal(value).setScale(digits, RoundingMode.HALF_EVEN);
         return rounded.signum() == 0 ? BigDecimal.ZERO.setScale(digits).toPlainString() : rounded.toPlainString();
+    }
+
+    /** {@return a number rounded to some significant digits and to a whole number} */
+    static String significant(double value, int digits) {
+        return new BigDecimal(value)
+                .round(new MathContext(digits, RoundingMode.HALF_EVEN))
+                .toBigInteger()
+                .toString();
     }
 
     /** {@return a number rounded to six digits behind the point, without trailing zeros} */

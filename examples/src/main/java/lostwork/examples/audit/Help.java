@@ -15,7 +15,8 @@ final class Help {
         }
         return """
                 Waste-heat audit: how much heat the streams of a works reject, how much work the second law allows to
-                win from it, and how much a machine is likely to win.
+                win from it, and how much a machine is likely to win. On the best hot gas a steam plant is designed: the
+                evaporation pressure with the most net power, its states, its exergy ledger, and what it gives in a year.
 
                 Arguments
                   --survey FILE   the streams, one a line; without it the bundled example is used

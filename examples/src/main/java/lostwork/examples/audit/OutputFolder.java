@@ -5,6 +5,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Collection;
 import java.util.Map;
 
 /** The folder that the results go to. */
@@ -72,6 +73,26 @@ final class OutputFolder {
                         target.toString(), "the file cannot be written", "a folder with room that you may write to"));
             }
         });
+    }
+
+    /**
+     * Removes files of an earlier run, so that they are not taken for results of this one.
+     *
+     * @param names the names of files that may be there
+     * @throws RefusedInputException if one is there and cannot be removed
+     */
+    void remove(Collection<String> names) {
+        for (String name : names) {
+            final Path target = folder.resolve(name);
+            try {
+                Files.deleteIfExists(target);
+            } catch (IOException e) {
+                throw new RefusedInputException(Problem.ofFile(
+                        target.toString(),
+                        "this file of an earlier run cannot be removed",
+                        "a folder that you may write to; name another one with --out"));
+            }
+        }
     }
 
     Path path() {

@@ -2,7 +2,7 @@ package lostwork.examples.audit;
 
 /** Breaks text into lines of a terminal's width. */
 final class Paragraph {
-    static final int WIDTH = 116;
+    static final int WIDTH = 108;
 
     private Paragraph() {}
 

@@ -10,6 +10,7 @@ import lostwork.examples.recovery.RecoveryPlant;
 import lostwork.ledger.Ledger;
 import lostwork.plant.Sensitivities;
 import lostwork.quantity.Energy;
+import lostwork.quantity.Money;
 import lostwork.report.Table;
 import lostwork.report.Table.Cell;
 
@@ -39,7 +40,7 @@ final class RecoveryReport {
                                 + whole(proposal.net().low().inKilowatts()) + " to "
                                 + whole(proposal.net().high().inKilowatts()) + " kW),",
                         "in a year " + whole(proposal.perYear().inMegawattHours()) + " MWh, worth "
-                                + whole(result.worth(proposal.perYear()).amount()) + " "
+                                + money(result.worth(proposal.perYear())) + " "
                                 + result.site().currency() + ", and "
                                 + whole(result.carbonDioxide(proposal.perYear()).inTonnes())
                                 + " t of CO2 spared"))
@@ -72,6 +73,9 @@ final class RecoveryReport {
         lines.add("Evaporation pressure and net power (" + recovery.evaluations() + " pressures tried)");
         lines.add("");
         lines.add(tables.pressures().toString());
+        paragraph(
+                "- Pinch is the least temperature difference between gas and water in the boiler. A plant is limited by"
+                        + " the pinch, by the lowest temperature that the gas may have, or by both.");
         recovery.findings().forEach(finding -> paragraph("- " + finding));
         lines.add("");
         lines.add("Streams of the plant at " + bar(recovery.best()) + " bar");
@@ -126,13 +130,11 @@ final class RecoveryReport {
                 low.inMegawattHours(),
                 high.inMegawattHours(),
                 "MWh/a");
-        row(
-                table,
-                "worth at the power price",
-                result.worth(year).amount(),
-                result.worth(low).amount(),
-                result.worth(high).amount(),
-                result.site().currency() + "/a");
+        table.row(
+                Cell.of("worth at the power price"),
+                Cell.of(money(result.worth(year))),
+                Cell.of(money(result.worth(low)) + " to " + money(result.worth(high))),
+                Cell.of(result.site().currency() + "/a"));
         row(
                 table,
                 "CO2 that the grid is spared",
@@ -151,7 +153,7 @@ final class RecoveryReport {
                 + " kW; the plant gives " + one(100 * net / likely)
                 + " % of that. The rule knows neither fans nor the losses of a turbine of this size.");
         paragraph("- The same gas sold as heat down to its lowest temperature would be worth "
-                + whole(result.worthAsHeat(figures.heatPerYear()).amount()) + " "
+                + money(result.worthAsHeat(figures.heatPerYear())) + " "
                 + result.site().currency()
                 + " a year, if somebody takes it.");
         paragraph("- " + uncertainty(proposal));
@@ -200,6 +202,11 @@ final class RecoveryReport {
 
     private static String one(double value) {
         return Decimals.fixed(value, 1);
+    }
+
+    /** Money of an estimate to three digits. */
+    private static String money(Money money) {
+        return Decimals.significant(money.amount(), 3);
     }
 
     private static String whole(double value) {

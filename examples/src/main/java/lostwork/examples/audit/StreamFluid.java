@@ -53,7 +53,7 @@ final class StreamFluid {
             final FlueGas gas =
                     FlueGas.of(burnt.fuel().make(), combustionAir(burnt.air()).from(siteAir(site)));
             final double airRatio = 1 + gas.excessAir().inFraction();
-            return gas(gas, medium.label() + ", air ratio " + Decimals.fixed(airRatio, 2));
+            return gas(gas, medium.label() + ", air " + Decimals.fixed(airRatio, 2));
         }
         return gas(IdealGas.of(composition((Medium.GasMixture) medium)), medium.label());
     }

@@ -8,7 +8,10 @@
  *       {@code SurveyReader} and {@code SiteReader}; every refusal becomes a {@code Problem} with file, line and column;
  *   <li>computing: {@code StreamFluid} (medium to property model), {@code CoolingPath} (heat and work per kilogram),
  *       {@code StreamAnalysis} (figures of a stream with their ranges), {@code AuditResult} (ranking and sums);
- *   <li>printing: {@code AuditReport}, {@code StreamCsv}, {@code StreamJson}, written by {@code OutputFolder}.
+ *   <li>recovery: {@code RecoveryStudy} looks for the best hot gas that takes a steam plant, which
+ *       {@code lostwork.examples.recovery} designs;
+ *   <li>printing: {@code AuditReport} with {@code RecoveryReport} and {@code RecoveryTables}, {@code StreamCsv},
+ *       {@code StreamJson}, {@code RecoveryJson}, written by {@code OutputFolder}.
  * </ul>
  *
  * <p>{@code WasteHeatAudit --help} tells how the two files are written; {@code AuditRules} holds the rules of the figures

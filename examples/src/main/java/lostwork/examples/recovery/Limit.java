@@ -5,9 +5,9 @@ public enum Limit {
     /** The least temperature difference in the boiler. */
     PINCH("pinch"),
     /** The lowest temperature that the gas may have. */
-    LOWEST_GAS_TEMPERATURE("lowest gas temperature"),
+    LOWEST_GAS_TEMPERATURE("lowest gas"),
     /** Both at once. */
-    BOTH("pinch and lowest gas temperature");
+    BOTH("both");
 
     private final String words;
 

@@ -9,6 +9,7 @@ import lostwork.plant.Sensitivities;
 import lostwork.quantity.Power;
 import lostwork.quantity.Pressure;
 import lostwork.quantity.Ratio;
+import lostwork.quantity.Temperature;
 import lostwork.quantity.TemperatureSpan;
 
 /** The recovery plant of a stream at its best evaporation pressure, with its exergy ledger. Immutable. */
@@ -16,18 +17,40 @@ public final class Recovery {
     /** A net power this close to the one at a bound of the search is said to be held by the bound. */
     private static final double AT_BOUND = 1e-3;
 
+    /** Thinner gas needs a boiler and a fan of another kind. */
+    private static final double LEAST_PRESSURE_OVER_LOSS = 10;
+
     private final HotGas gas;
     private final RecoveryDesign design;
     private final MachineSize size;
     private final PressureSearch.Result search;
     private final Ledger ledger;
+    private final ReferenceEnvironment ambient;
 
-    private Recovery(HotGas gas, RecoveryDesign design, MachineSize size, PressureSearch.Result search, Ledger ledger) {
+    private Recovery(
+            HotGas gas,
+            RecoveryDesign design,
+            MachineSize size,
+            PressureSearch.Result search,
+            Ledger ledger,
+            ReferenceEnvironment ambient) {
         this.gas = gas;
         this.design = design;
         this.size = size;
         this.search = search;
         this.ledger = ledger;
+        this.ambient = ambient;
+    }
+
+    /**
+     * The ambient, or where it is colder than the model of water goes, the coldest environment of that model: the books
+     * need a state of the water in it. In a closed circuit that state cancels, so only T0 differs.
+     */
+    private static ReferenceEnvironment environmentOfTheBooks(ReferenceEnvironment ambient, RecoveryPlant plant) {
+        final Temperature coldest = Temperature.kelvin(plant.water().range().lowestTemperature());
+        return ambient.temperature().compareTo(coldest) >= 0
+                ? ambient
+                : ReferenceEnvironment.of(coldest, ambient.pressure());
     }
 
     /**
@@ -55,7 +78,8 @@ public final class Recovery {
                 continue;
             }
             requireWorthwhile(best, design);
-            return new Recovery(gas, design, size, search, Ledger.of(best.solution(), ambient, plant.marks()));
+            final Ledger ledger = Ledger.of(best.solution(), environmentOfTheBooks(ambient, plant), plant.marks());
+            return new Recovery(gas, design, size, search, ledger, ambient);
         }
     }
 
@@ -66,6 +90,11 @@ public final class Recovery {
         }
         if (gas.lowest().compareTo(gas.supply()) >= 0) {
             throw new NoRecoveryException("the gas must not be cooled below its supply temperature");
+        }
+        if (gas.pressure().si()
+                < LEAST_PRESSURE_OVER_LOSS * design.gasPressureLoss().value().si()) {
+            throw new NoRecoveryException("the gas is at " + gas.pressure() + ", too thin for a boiler that takes "
+                    + design.gasPressureLoss().text() + " of its pressure");
         }
         if (gas.expectedWork().compareTo(design.smallestPlant().value()) < 0) {
             throw new NoRecoveryException("the gas is likely to give " + text(gas.expectedWork()) + ", less than the "
@@ -147,6 +176,12 @@ public final class Recovery {
         final List<String> findings = new ArrayList<>();
         findings.add(coolingLimit());
         findings.add(pressureLimit());
+        if (!ledger.environment().temperature().equals(ambient.temperature())) {
+            findings.add(
+                    "The exergy ledger is kept against " + ledger.environment().temperature()
+                            + ", not against the ambient " + ambient.temperature()
+                            + ": the model of water does not go below. Powers and heats are not affected.");
+        }
         return findings;
     }
 

@@ -64,7 +64,7 @@ public record RecoveryDesign(
         return new RecoveryDesign(
                 new Assumption<>("least gas temperature for steam", celsius(250), PRACTICE),
                 new Assumption<>("smallest plant worth a look", kilowatts(50), PRACTICE),
-                new Assumption<>("boiler pinch", kelvins(12), "8 K to 15 K in heat-recovery boilers: " + PRACTICE),
+                new Assumption<>("boiler pinch", kelvins(12), "8 K to 15 K in waste-heat boilers: " + PRACTICE),
                 new Assumption<>("gas above steam at the hot end", kelvins(30), "20 K to 50 K: " + PRACTICE),
                 new Assumption<>("highest steam temperature", celsius(450), "low-alloy superheater tubes: " + PRACTICE),
                 new Assumption<>("least superheat", kelvins(20), PRACTICE),
@@ -78,9 +78,7 @@ public record RecoveryDesign(
                 new Assumption<>("lowest condensing temperature", celsius(30), "vacuum and frost: " + PRACTICE),
                 new Assumption<>("subcooling of the condensate", kelvins(2), PRACTICE),
                 new Assumption<>(
-                        "gas pressure loss in the boiler",
-                        kilopascals(1.5),
-                        "1.5 kPa to 3.7 kPa in heat-recovery boilers: " + PRACTICE),
+                        "gas pressure loss in the boiler", kilopascals(1.5), "1.5 kPa to 3.7 kPa: " + PRACTICE),
                 new Assumption<>("draught fan isentropic efficiency", percent(65), "60 % to 70 %: " + PRACTICE),
                 new Assumption<>("condenser fan power over its heat", percent(0.9), "0.5 % to 1.3 %: " + WALAS),
                 new Assumption<>(

@@ -86,7 +86,8 @@ class RecoveryReportTest {
         assertEquals(8.5 * net, inJson("energy per year in MWh"), 1e-9 * net);
         assertEquals(8.5 * net, printed("energy in 8500 hours a year"), 0.5);
         // Price and carbon intensity of the bundled site.
-        assertEquals(8.5 * net * 96, printed("worth at the power price"), 0.5);
+        assertEquals(8.5 * net * 96, printed("worth at the power price"), 500);
+        assertEquals(8.5 * net * 96, inJson("worth per year in EUR"), 1e-6 * net);
         assertEquals(8.5 * net * 0.310, printed("CO2 that the grid is spared"), 0.5);
         assertTrue(unwrapped().contains("Result     a steam plant on G1 furnace gas would give " + Math.round(net)));
         assertEquals(8, file("plant-states.csv").lines().count());
@@ -162,8 +163,11 @@ class RecoveryReportTest {
 
     @Test
     void saysThatNoStreamIsAGas() throws IOException {
+        Files.createDirectories(results());
+        Files.writeString(results().resolve("ledger.csv"), "of an earlier run");
         assertEquals(0, run(SurveyText.HEADING, "water,water,,20 t/h,90 °C,60 °C,2 bar,8000,5 %,2 K"));
         assertTrue(unwrapped().contains("No stream is a gas with heat to give"), unwrapped());
+        assertFalse(Files.exists(results().resolve("ledger.csv")), "a ledger of an earlier run is left");
     }
 
     @Test

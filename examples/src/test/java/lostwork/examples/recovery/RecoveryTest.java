@@ -3,7 +3,9 @@ package lostwork.examples.recovery;
 import static lostwork.examples.recovery.HotGases.AMBIENT;
 import static lostwork.examples.recovery.HotGases.flueGas;
 import static lostwork.examples.recovery.HotGases.recovery;
+import static lostwork.quantity.Pressure.mbar;
 import static lostwork.quantity.Ratio.percent;
+import static lostwork.quantity.Temperature.celsius;
 import static lostwork.quantity.TemperatureSpan.kelvins;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
@@ -11,6 +13,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Random;
 import java.util.stream.IntStream;
+import lostwork.exergy.ReferenceEnvironment;
 import lostwork.fluid.FluidState;
 import lostwork.plant.PlantSolveException;
 import lostwork.quantity.Power;
@@ -123,6 +126,32 @@ class RecoveryTest {
         assertTrue(best.gasOutlet().inCelsius() >= gas.lowest().inCelsius() - 1e-6, gas.toString());
         assertTrue(best.pinch().inKelvins() >= 12 - 1e-6, gas.toString());
         assertTrue(best.outletVapour().map(x -> x.inFraction() >= 0.88 - 1e-9).orElse(true), gas.toString());
+    }
+
+    @Test
+    void inFrostTheBooksAreKeptAgainstTheColdestWaterAndSaySo() {
+        final ReferenceEnvironment frost = ReferenceEnvironment.of(celsius(-15), mbar(1013));
+        final Recovery recovery =
+                Recovery.of(flueGas(15, 465, 180), frost, RecoveryDesign.smallWasteHeatPlant(), tried -> {});
+        assertEquals(0, recovery.ledger().environment().temperature().inCelsius(), 1e-9);
+        assertTrue(recovery.ledger().closure().inFraction() <= 1e-9);
+        assertTrue(
+                recovery.findings().stream()
+                        .anyMatch(f ->
+                                f.startsWith("The exergy ledger is kept against 0 °C, not against the ambient -15 °C")),
+                recovery.findings().toString());
+        // The condenser is not run colder than 30 °C, so frost gives little over a condenser at 34 °C.
+        assertTrue(recovery.netPower().compareTo(recovery(flueGas(15, 465, 180)).netPower()) > 0);
+    }
+
+    @Test
+    void saysThatThinGasIsTooThin() {
+        final HotGas gas = flueGas(15, 465, 180);
+        final HotGas thin =
+                new HotGas("thin", gas.fluid(), gas.flow(), gas.supply(), gas.lowest(), mbar(40), gas.expectedWork());
+        final NoRecoveryException none = assertThrows(NoRecoveryException.class, () -> recovery(thin));
+        assertEquals(
+                "the gas is at 0.04 bar, too thin for a boiler that takes 1.50 kPa of its pressure", none.getMessage());
     }
 
     @Test
