@@ -111,6 +111,18 @@ final class IdealGasModel implements FluidModel {
         return provenance;
     }
 
+    /** Zero: the polynomials themselves count from the elements, mixed or not. */
+    @Override
+    public double enthalpyFromElements() {
+        return 0;
+    }
+
+    /** Zero: the polynomials themselves give absolute entropies, and mixing is counted. */
+    @Override
+    public double entropyFromAbsoluteZero() {
+        return 0;
+    }
+
     @Override
     public void evaluate(double temperature, double pressure, PhaseSide side, StatePoint out) {
         final CaloricCurve.Segment segment = curve.at(temperature);
