@@ -144,6 +144,8 @@ final class Flash {
         if (!(fraction >= 0 && fraction <= 1)) {
             throw new OutOfRangeException("vapour fraction", fraction, 0, 1, "1", "lever rule", "");
         }
+        // A saturation line may reach beyond the range of its model, such as up to a critical point above it.
+        requirePressure(model, pressure);
         final StatePoint liquid = out.liquidSide();
         final StatePoint vapour = out.vapourSide();
         model.evaluate(temperature, pressure, PhaseSide.LIQUID, liquid);
@@ -163,6 +165,7 @@ final class Flash {
 
     private static void saturated(
             FluidModel model, double temperature, double pressure, PhaseSide side, StatePoint out) {
+        requirePressure(model, pressure);
         model.evaluate(temperature, pressure, side, out);
         out.vapourFraction = side == PhaseSide.LIQUID ? 0 : 1;
     }

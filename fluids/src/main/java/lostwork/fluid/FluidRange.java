@@ -82,4 +82,11 @@ public record FluidRange(
                     "pressure", pressure, lowestPressure, highestPressure, "Pa", limitedBy, WAY_OUT);
         }
     }
+
+    /** {@return the limits with their units, and what sets them} */
+    @Override
+    public String toString() {
+        return lowestTemperature + " K to " + highestTemperature + " K, " + lowestPressure + " Pa to " + highestPressure
+                + " Pa (" + limitedBy + ")";
+    }
 }

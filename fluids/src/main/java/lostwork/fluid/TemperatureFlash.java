@@ -32,6 +32,11 @@ final class TemperatureFlash {
             return searchGas(model, temperature, property, asked, lowest, highest, false, false, first, out);
         }
         final double boiling = saturation.pressure(temperature);
+        if (boiling > highest) {
+            // The saturation line has left the range: every state of this temperature is a vapour.
+            final double first = Double.isNaN(guess) ? highest : Math.min(guess, highest);
+            return searchGas(model, temperature, property, asked, lowest, highest, false, false, first, out);
+        }
         final StatePoint liquid = out.liquidSide();
         model.evaluate(temperature, boiling, PhaseSide.LIQUID, liquid);
         final double ofLiquid = property.of(liquid);

@@ -1,5 +1,6 @@
 package lostwork.fluid.gas;
 
+import java.util.Locale;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Ratio;
 
@@ -129,5 +130,17 @@ public final class CombustionAir {
             throw new OutOfRangeException("oxygen in the flue gas", oxygen.si(), 0, 1, "1", "a mole fraction", "");
         }
         return oxygen.si();
+    }
+
+    /** {@return how much of which air, in words} */
+    @Override
+    public String toString() {
+        final String words = switch (basis) {
+            case EXCESS -> "excess air";
+            case OXYGEN_IN_DRY_GAS -> "oxygen in the dry flue gas";
+            case OXYGEN_IN_WET_GAS -> "oxygen in the wet flue gas";
+        };
+        return String.format(
+                Locale.ROOT, "%s %.4g %% (%s)", words, 100 * value, air.model().name());
     }
 }
