@@ -66,7 +66,8 @@ final class RecoveryReport {
         lines.add("Recovery plant: steam set on " + tag);
         lines.add("");
         outcome.passedOver().forEach(sentence -> paragraph("Passed over: " + sentence));
-        paragraph(tag + " is the best stream that suits a steam plant: boiler, turbine with generator, air-cooled"
+        paragraph(tag
+                + " is the highest in the ranking that suits a steam plant: boiler, turbine with generator, air-cooled"
                 + " condenser and feed pump, and a draught fan that makes up for the pressure loss of the gas. Net power is"
                 + " what the generator makes less what the motors and fans take.");
         lines.add("");

@@ -19,7 +19,7 @@ final class StreamCsv {
                 .numbers("mass flow", "kg/s", 4)
                 .numbers("supply temperature", "°C", 2)
                 .numbers("lowest allowed temperature", "°C", 2)
-                .numbers("counted down to", "°C", 2)
+                .numbers("lowest counted temperature", "°C", 2)
                 .numbers("pressure", "bar", 4)
                 .numbers("heat rejected", "kW", 2)
                 .numbers("heat uncertainty", "kW", 2)

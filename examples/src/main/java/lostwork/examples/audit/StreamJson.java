@@ -76,7 +76,7 @@ final class StreamJson {
                 .put("mass flow in kg/s", figures.massFlow().inKilogramsPerSecond())
                 .put("supply temperature in °C", stream.supply().inCelsius())
                 .put("lowest allowed temperature in °C", stream.lowest().inCelsius())
-                .put("counted down to in °C", figures.lowestCounted().inCelsius())
+                .put("lowest counted temperature in °C", figures.lowestCounted().inCelsius())
                 .put("pressure in bar", stream.pressure().inBar());
         estimate(json, "heat", figures.heat());
         json.put(
