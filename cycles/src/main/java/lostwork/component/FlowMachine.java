@@ -63,6 +63,7 @@ abstract class FlowMachine extends ThroughFlow {
     /** States the limits of the efficiency and what the pressure ratio is. */
     final void describeRatios(Equations e, Expression higherPressure, Expression lowerPressure) {
         e.define("pressure ratio", pressureRatio, pressureRatio.times(lowerPressure), higherPressure);
+        e.require("a pressure ratio of at least 1", higherPressure.minus(lowerPressure));
         e.require("an isentropic efficiency above 0 %", isentropicEfficiency);
         e.require(
                 "an isentropic efficiency of at most 100 %",

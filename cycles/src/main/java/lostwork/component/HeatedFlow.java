@@ -33,5 +33,8 @@ abstract class HeatedFlow extends ThroughFlow {
                 relativePressureLoss.times(inlet().pressure()),
                 inlet().pressure().minus(outlet().pressure()));
         e.assume("no pressure loss", inlet().pressure(), outlet().pressure());
+        e.require(
+                "an outlet pressure of at most the inlet pressure",
+                inlet().pressure().minus(outlet().pressure()));
     }
 }

@@ -57,5 +57,8 @@ public final class Valve extends ThroughFlow {
         e.law("energy balance", outlet().enthalpy(), inlet().enthalpy());
         e.define("pressure loss", pressureLoss, inlet().pressure().minus(outlet().pressure()));
         e.define("pressure ratio", pressureRatio, pressureRatio.times(outlet().pressure()), inlet().pressure());
+        e.require(
+                "an outlet pressure of at most the inlet pressure",
+                inlet().pressure().minus(outlet().pressure()));
     }
 }

@@ -18,6 +18,9 @@ import org.jspecify.annotations.Nullable;
  * somebody reads, and the requirements of the components. Compiled once for a plan; immutable and thread-safe.
  */
 final class Completion {
+    /** The share of the size of its terms below which a difference is rounding. */
+    private static final double ROUNDING = 1e-9;
+
     private final SolvePlan plan;
     private final Layout layout;
     private final Map<Integer, Tape> definitions = new HashMap<>();
@@ -37,7 +40,7 @@ final class Completion {
             }
         });
         for (Equations.Requirement requirement : plant.requirements()) {
-            requirements.add(compile(requirement.notNegative(), requirement.notNegative(), requirementSites));
+            requirements.add(compileTerm(requirement.notNegative(), requirementSites));
         }
     }
 
@@ -46,6 +49,12 @@ final class Completion {
         final int l = left.emit(b, plan.plant().resolution());
         final int r = right.emit(b, plan.plant().resolution());
         return b.build(l, r);
+    }
+
+    /** The equation "term = 0", whose residual is the value of the term. */
+    private Tape compileTerm(Expression term, CallSites sites) {
+        final Tape.Builder b = new Tape.Builder(sites);
+        return b.build(term.emit(b, plan.plant().resolution()), b.constant(0));
     }
 
     /**
@@ -93,7 +102,7 @@ final class Completion {
             return all[slot];
         }
 
-        /** {@return the value of each requirement, in the order of the plant; NaN where it has none} */
+        /** {@return the value of each requirement, in the order of the plant; 0 within rounding, NaN where it has none} */
         synchronized double[] requirements() {
             final double[] result = new double[requirements.size()];
             Arrays.fill(result, Double.NaN);
@@ -101,10 +110,21 @@ final class Completion {
                 if (isReady(requirements.get(i), -1)) {
                     final Workspace w = forRequirements();
                     prepare(requirements.get(i), -1, w);
-                    result[i] = w.leftSide(requirements.get(i));
+                    result[i] = withoutRounding(requirements.get(i), w);
                 }
             }
             return result;
+        }
+
+        /** The value of a term, 0 where it is no more than the rounding of what it is made of. */
+        private double withoutRounding(Tape term, Workspace w) {
+            final double[] derivatives = new double[term.size()];
+            final double value = w.evaluate(term, derivatives);
+            double size = 0;
+            for (int k = 0; k < derivatives.length; k++) {
+                size += Math.abs(derivatives[k] * w.get(term.slot(k)));
+            }
+            return Math.abs(value) <= ROUNDING * size ? 0 : value;
         }
 
         private Workspace forDefinitions() {

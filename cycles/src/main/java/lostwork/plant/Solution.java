@@ -19,14 +19,12 @@ public final class Solution {
     private final SolvePlan plan;
     private final Specification specification;
     private final double[] values;
-    private final double largestResidual;
     private volatile Completion.@Nullable Values completed;
 
-    Solution(SolvePlan plan, Specification specification, double[] values, double largestResidual) {
+    Solution(SolvePlan plan, Specification specification, double[] values) {
         this.plan = plan;
         this.specification = specification;
         this.values = values;
-        this.largestResidual = largestResidual;
     }
 
     /** {@return the solve plan} */
@@ -49,7 +47,7 @@ public final class Solution {
      * its natural scale}
      */
     public double largestResidual() {
-        return largestResidual;
+        return plan.system().largestResidual(values);
     }
 
     /**

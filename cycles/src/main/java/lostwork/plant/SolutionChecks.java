@@ -14,9 +14,6 @@ final class SolutionChecks {
     /** The share of the largest entropy flow below which a negative entropy generation is rounding. */
     private static final double ROUNDING = 1e-9;
 
-    /** How far below zero a requirement is rounding, in its coherent SI unit. */
-    private static final double REQUIREMENT_ROUNDING = 1e-7;
-
     private static final int NONE = -1;
 
     /**
@@ -92,7 +89,7 @@ final class SolutionChecks {
         }
         final double[] values = solution.requirements();
         for (int i = 0; i < values.length; i++) {
-            if (values[i] < -REQUIREMENT_ROUNDING) {
+            if (values[i] < 0) {
                 final Equations.Requirement requirement = requirements.get(i);
                 findings.add(requirement.component() + ": " + requirement.words() + " is not met (by "
                         + (float) -values[i] + ")");

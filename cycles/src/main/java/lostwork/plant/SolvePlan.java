@@ -157,12 +157,12 @@ public final class SolvePlan {
     }
 
     private boolean mayHaveSeveralSolutions(int[] block) {
-        final Tape tape = system.equations().get(block[0]);
-        return block.length > 1 || !tape.isAffineIn(tape.placeOf(system.matched()[block[0]]));
+        final Tape tape = system.equation(block[0]);
+        return block.length > 1 || !tape.isAffineIn(tape.placeOf(system.matched(block[0])));
     }
 
     private Solution solveOnce(Specification specification, SolveOptions options, long deadline, int search) {
-        final Workspace w = system.workspace(List.of());
+        final Workspace w = system.workspace();
         for (int i = 0; i < givenSlots.length; i++) {
             w.set(givenSlots[i], specification.si(givenVariables.get(i)));
         }
@@ -186,21 +186,16 @@ public final class SolvePlan {
         } catch (BlockFailure failure) {
             throw explain(failure);
         }
-        double largest = 0;
-        for (int[] block : system.blocks()) {
-            for (int equation : block) {
-                largest = Math.max(largest, solver.scaledResidual(equation));
-            }
-        }
         if (solver.anyOutsideRange()) {
             throw outsideRange(w);
         }
-        final Solution solution = new Solution(this, specification, w.copyOfValues(), largest);
+        final Solution solution = new Solution(this, specification, w.copyOfValues());
         try {
             solution.complete();
         } catch (OutOfRangeException e) {
             throw outsideRange(w); // a state whose temperature and entropy no equation used
         }
+        system.release(w);
         return solution;
     }
 
@@ -247,7 +242,7 @@ public final class SolvePlan {
                 .map(i -> entries.get(block[i]).equation())
                 .toList();
         final List<Variable<?>> unknowns = Arrays.stream(block)
-                .mapToObj(e -> variableOf(system.matched()[e]))
+                .mapToObj(e -> variableOf(system.matched(e)))
                 .collect(java.util.stream.Collectors.toCollection(ArrayList::new));
         final String head = "plant \"" + plant.name() + "\": ";
         return switch (failure.reason()) {
@@ -346,7 +341,7 @@ public final class SolvePlan {
         for (int[] block : system.blocks()) {
             text.append("  ")
                     .append(Arrays.stream(block)
-                            .mapToObj(e -> variableOf(system.matched()[e]) + " from "
+                            .mapToObj(e -> variableOf(system.matched(e)) + " from "
                                     + entries.get(e).equation().words())
                             .collect(java.util.stream.Collectors.joining("; ")))
                     .append('\n');

@@ -1,6 +1,5 @@
 package lostwork.plant.kernel;
 
-import java.util.List;
 import lostwork.solve.DenseLu;
 
 /** Derivatives of a solution by one pass backwards through its transposed blocks. */
@@ -15,7 +14,7 @@ public final class Adjoint {
      * @param of the slot that changes
      */
     public static double[] gradient(EquationSystem system, double[] values, int of) {
-        final Workspace w = system.workspace(List.of());
+        final Workspace w = system.workspace();
         System.arraycopy(values, 0, w.x, 0, values.length);
         final double[] total = new double[values.length];
         total[of] = 1;
@@ -30,7 +29,7 @@ public final class Adjoint {
         final double[] seed = new double[n];
         boolean any = false;
         for (int j = 0; j < n; j++) {
-            final int slot = system.matched()[block[j]];
+            final int slot = system.matched(block[j]);
             seed[j] = total[slot];
             total[slot] = 0;
             any |= seed[j] != 0;
@@ -41,11 +40,11 @@ public final class Adjoint {
         final double[][] gradients = new double[n][];
         final double[] matrix = new double[n * n];
         for (int i = 0; i < n; i++) {
-            final Tape tape = system.equations().get(block[i]);
+            final Tape tape = system.equation(block[i]);
             tape.evaluate(w);
             gradients[i] = java.util.Arrays.copyOf(w.gradient, tape.size());
             for (int j = 0; j < n; j++) {
-                final int place = tape.placeOf(system.matched()[block[j]]);
+                final int place = tape.placeOf(system.matched(block[j]));
                 matrix[i * n + j] = place < 0 ? 0 : gradients[i][place];
             }
         }
@@ -54,7 +53,7 @@ public final class Adjoint {
         lu.factor(matrix, n);
         lu.solveTransposed(seed, seed);
         for (int i = 0; i < n; i++) {
-            final Tape tape = system.equations().get(block[i]);
+            final Tape tape = system.equation(block[i]);
             for (int k = 0; k < tape.size(); k++) {
                 final int slot = tape.slot(k);
                 if (!isOf(slot, system, block)) {
@@ -84,7 +83,7 @@ public final class Adjoint {
 
     private static boolean isOf(int slot, EquationSystem system, int[] block) {
         for (int equation : block) {
-            if (system.matched()[equation] == slot) {
+            if (system.matched(equation) == slot) {
                 return true;
             }
         }

@@ -31,6 +31,9 @@ public final class BlockSolver {
     private static final int NEAR_POINTS = 10;
     private static final int NEWTON_ITERATIONS = 80;
 
+    /** How many steps pass between two looks at the clock. */
+    private static final int TICKS = 16;
+
     private final EquationSystem system;
     private final Workspace w;
     private final StartValues starts;
@@ -41,6 +44,7 @@ public final class BlockSolver {
 
     private int presentNumber;
 
+    private int ticks;
     private double[] matrix = new double[0];
     private double[] step = new double[0];
     private double[] residuals = new double[0];
@@ -96,7 +100,7 @@ public final class BlockSolver {
                 solveLoop(number, block, warm);
             }
             for (int equation : block) {
-                known[system.matched()[equation]] = true;
+                known[system.matched(equation)] = true;
             }
             number++;
             limits.progress().accept(number);
@@ -105,6 +109,9 @@ public final class BlockSolver {
 
     /** Ends the solve when the caller wants it or the time is over; asked before each step that may take long. */
     private void checkLimits() {
+        if (ticks++ % TICKS != 0) {
+            return;
+        }
         final BlockFailure.Reason reason = limits.cancelled().getAsBoolean()
                 ? BlockFailure.Reason.CANCELLED
                 : System.nanoTime() - limits.deadlineNanos() > 0 ? BlockFailure.Reason.OUT_OF_TIME : null;
@@ -125,7 +132,7 @@ public final class BlockSolver {
     private int[] slotsOf(int[] block) {
         final int[] slots = new int[block.length];
         for (int i = 0; i < block.length; i++) {
-            slots[i] = system.matched()[block[i]];
+            slots[i] = system.matched(block[i]);
         }
         return slots;
     }
@@ -134,8 +141,8 @@ public final class BlockSolver {
 
     private void solveSingle(int number, int[] block, boolean warm) {
         final int equation = block[0];
-        final int slot = system.matched()[equation];
-        final Tape tape = system.equations().get(equation);
+        final int slot = system.matched(equation);
+        final Tape tape = system.equation(equation);
         final int place = tape.placeOf(slot);
         if (tape.isAffineIn(place)) {
             w.x[slot] = 0; // also in a warm start, which then gives the same bits as a cold one
@@ -159,6 +166,9 @@ public final class BlockSolver {
             throw failure(BlockFailure.Reason.NOT_MET, number, block);
         }
         tape.evaluate(w);
+        if (tape.isOutside(w)) {
+            throw failure(BlockFailure.Reason.NOT_MET, number, block); // met only where the fluid is continued
+        }
         if (!(Math.abs(w.gradient[place]) * scale(slot) > SINGULAR * rowScale(tape))) {
             throw singular(number, block, new double[] {1}, new double[] {1});
         }
@@ -166,7 +176,7 @@ public final class BlockSolver {
 
     /** Newton iteration from the present value, kept between the limits and inside a bracket once one is found. */
     private boolean newton(Tape tape, int place, int slot) {
-        final SlotScale bounds = system.scales().get(slot);
+        final SlotScale bounds = system.scale(slot);
         double low = bounds.lowest();
         double high = bounds.highest();
         double lowResidual = Double.NaN;
@@ -248,7 +258,7 @@ public final class BlockSolver {
 
     /** Looks for a change of sign over the whole range, nearest to the start first, and iterates from there. */
     private boolean scan(Tape tape, int place, int slot, double start) {
-        final SlotScale bounds = system.scales().get(slot);
+        final SlotScale bounds = system.scale(slot);
         final double[] at = scanPoints(bounds, start);
         final double[] r = new double[at.length];
         for (int i = 0; i < at.length; i++) {
@@ -343,7 +353,7 @@ public final class BlockSolver {
         starts.prepare(slots, known, w);
         final double[] first = new double[n];
         for (int j = 0; j < n; j++) {
-            first[j] = system.scales().get(slots[j]).clamp(w.x[slots[j]]);
+            first[j] = system.scale(slots[j]).clamp(w.x[slots[j]]);
         }
         final SplittableRandom random = new SplittableRandom((limits.seed() * 31 + number) * 31 + limits.search());
         // A later search wants another solution: the scan of a cut loop finds them all.
@@ -402,7 +412,7 @@ public final class BlockSolver {
     }
 
     private boolean scanCut(Tearing cut, double start) {
-        final SlotScale bounds = system.scales().get(cut.slot());
+        final SlotScale bounds = system.scale(cut.slot());
         final double[] at = scanPoints(bounds, start);
         final double[] r = new double[at.length];
         for (int i = 0; i < at.length; i++) {
@@ -455,7 +465,7 @@ public final class BlockSolver {
         checkLimits();
         w.x[cut.slot()] = value;
         for (int i = 0; i < cut.slots().length; i++) {
-            final Tape tape = system.equations().get(cut.equations()[i]);
+            final Tape tape = system.equation(cut.equations()[i]);
             final int slot = cut.slots()[i];
             final int place = tape.placeOf(slot);
             if (tape.isAffineIn(place)) {
@@ -467,12 +477,12 @@ public final class BlockSolver {
                 return Double.NaN;
             }
         }
-        return system.equations().get(cut.residual()).forward(w);
+        return system.equation(cut.residual()).forward(w);
     }
 
     private boolean isOutside(int[] block) {
         for (int equation : block) {
-            final Tape tape = system.equations().get(equation);
+            final Tape tape = system.equation(equation);
             tape.forward(w);
             if (tape.isOutside(w)) {
                 return true;
@@ -482,7 +492,7 @@ public final class BlockSolver {
     }
 
     private double perturbed(int slot, double value, SplittableRandom random, int attempt) {
-        final SlotScale scale = system.scales().get(slot);
+        final SlotScale scale = system.scale(slot);
         final double spread = Math.min(1.5, 0.25 * attempt);
         final double draw = 2 * random.nextDouble() - 1;
         final double moved = scale.proportional() && value != 0
@@ -506,14 +516,14 @@ public final class BlockSolver {
     private void sweep(int[] block, int[] slots) {
         for (int i = 0; i < block.length; i++) {
             checkLimits();
-            final Tape tape = system.equations().get(block[i]);
+            final Tape tape = system.equation(block[i]);
             final int slot = slots[i];
             final int place = tape.placeOf(slot);
             final double before = w.x[slot];
             if (tape.isAffineIn(place)) {
                 final double r = tape.evaluate(w);
                 final double next = before - r / w.gradient[place];
-                final SlotScale bounds = system.scales().get(slot);
+                final SlotScale bounds = system.scale(slot);
                 if (Double.isFinite(next)) {
                     w.x[slot] = bounds.clamp(next);
                 }
@@ -571,7 +581,7 @@ public final class BlockSolver {
     /** Moves the unknowns along the step, each at most to nine tenths of the way to its limit. */
     private void move(int[] slots, double damping) {
         for (int j = 0; j < slots.length; j++) {
-            final SlotScale bounds = system.scales().get(slots[j]);
+            final SlotScale bounds = system.scale(slots[j]);
             final double from = saved[j];
             double to = from + damping * step[j] * bounds.at(from);
             if (bounds.proportional() && from > 0 && to < 0.1 * from && bounds.lowest() >= 0) {
@@ -591,7 +601,7 @@ public final class BlockSolver {
         final int n = block.length;
         double norm = 0;
         for (int i = 0; i < n; i++) {
-            final Tape tape = system.equations().get(block[i]);
+            final Tape tape = system.equation(block[i]);
             final double r = tape.evaluate(w);
             rowScale[i] = rowScale(tape);
             residuals[i] = r / rowScale[i];
@@ -662,7 +672,7 @@ public final class BlockSolver {
     private double residualNorm(int[] block, double[] scales) {
         double norm = 0;
         for (int i = 0; i < block.length; i++) {
-            norm = larger(norm, Math.abs(system.equations().get(block[i]).forward(w)) / scales[i]);
+            norm = larger(norm, Math.abs(system.equation(block[i]).forward(w)) / scales[i]);
         }
         return Double.isNaN(norm) ? Double.POSITIVE_INFINITY : norm;
     }
@@ -702,16 +712,11 @@ public final class BlockSolver {
     // ------------------------------------------------------------------------------------------------ scales
 
     private double scale(int slot) {
-        return system.scales().get(slot).at(w.x[slot]);
+        return system.scale(slot).at(w.x[slot]);
     }
 
-    /** The sum over the slots of the equation evaluated last of |∂r/∂x| times the scale of the slot. */
     private double rowScale(Tape tape) {
-        double sum = 0;
-        for (int k = 0; k < tape.size(); k++) {
-            sum += Math.abs(w.gradient[k]) * scale(tape.slot(k));
-        }
-        return sum > 0 ? sum : 1;
+        return system.rowScale(tape, w);
     }
 
     /**
@@ -720,9 +725,7 @@ public final class BlockSolver {
      * @param equation the equation
      */
     public double scaledResidual(int equation) {
-        final Tape tape = system.equations().get(equation);
-        final double r = tape.evaluate(w);
-        return Math.abs(r) / rowScale(tape);
+        return system.scaledResidual(system.equation(equation), w);
     }
 
     /** {@return whether a property function lay outside the range of its fluid in its last evaluation} */

@@ -16,7 +16,10 @@ import org.jspecify.annotations.Nullable;
  */
 record Tearing(int slot, int residual, int[] equations, int[] slots) {
     /** More steps than this that need an iteration of their own make a cut too dear. */
-    private static final int NESTED = 2;
+    private static final int NESTED = 1;
+
+    /** How many cuts of a block are worth trying. */
+    private static final int CUTS = 4;
 
     /**
      * {@return the cheapest cuts of a block, those without nested iterations first; empty when it cannot be cut at one
@@ -31,8 +34,8 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
             byCost.add(new ArrayList<>());
         }
         for (int equation : block) {
-            final int slot = system.matched()[equation];
-            final SlotScale scale = system.scales().get(slot);
+            final int slot = system.matched(equation);
+            final SlotScale scale = system.scale(slot);
             if (scale.highest() - scale.lowest() < WIDEST * scale.natural()) {
                 for (int cost = 0; cost <= NESTED; cost++) {
                     final Tearing cut = cutAt(system, block, slot, cost);
@@ -45,7 +48,7 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
         }
         final List<Tearing> all = new ArrayList<>();
         byCost.forEach(all::addAll);
-        return all;
+        return all.subList(0, Math.min(CUTS, all.size()));
     }
 
     /** An unknown whose limits are further apart than this many natural scales cannot be scanned. */
@@ -56,8 +59,8 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
         final boolean[] used = new boolean[n];
         final List<Integer> open = new ArrayList<>();
         for (int equation : block) {
-            if (system.matched()[equation] != cut) {
-                open.add(system.matched()[equation]);
+            if (system.matched(equation) != cut) {
+                open.add(system.matched(equation));
             }
         }
         final int[] equations = new int[n - 1];
@@ -74,7 +77,7 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
             }
             used[chosen] = true;
             equations[step] = block[chosen];
-            slots[step] = onlyOpen(system.equations().get(block[chosen]), open);
+            slots[step] = onlyOpen(system.equation(block[chosen]), open);
             open.remove(Integer.valueOf(slots[step]));
         }
         for (int i = 0; i < n; i++) {
@@ -89,7 +92,7 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
     private static int next(
             EquationSystem system, int[] block, boolean[] used, List<Integer> open, boolean affineOnly) {
         for (int i = 0; i < block.length; i++) {
-            final Tape tape = system.equations().get(block[i]);
+            final Tape tape = system.equation(block[i]);
             final int slot = used[i] ? -1 : onlyOpen(tape, open);
             if (slot >= 0 && (!affineOnly || tape.isAffineIn(tape.placeOf(slot)))) {
                 return i;
