@@ -38,18 +38,21 @@ public final class Ledger {
     private final List<StreamExergy> streams;
     private final List<ComponentExergy> components;
     private final List<BoundaryExergy> boundary;
+    private final List<String> notes;
 
     private Ledger(
             Solution solution,
             ReferenceEnvironment environment,
             List<StreamExergy> streams,
             List<ComponentExergy> components,
-            List<BoundaryExergy> boundary) {
+            List<BoundaryExergy> boundary,
+            List<String> notes) {
         this.solution = solution;
         this.environment = environment;
         this.streams = List.copyOf(streams);
         this.components = List.copyOf(components);
         this.boundary = List.copyOf(boundary);
+        this.notes = List.copyOf(notes);
     }
 
     /**
@@ -106,7 +109,12 @@ public final class Ledger {
                     + unused + "; the ports at its boundary are "
                     + boundary.stream().map(BoundaryExergy::port).toList());
         }
-        return new Ledger(solution, environment, streams, components, boundary);
+        final List<String> notes = exergies.shifted().stream()
+                .map(zero -> "The model of " + zero.fluid()
+                        + " does not reach the ambient temperature: its exergy counts from " + zero.temperature()
+                        + ". Destructions and differences do not depend on that.")
+                .toList();
+        return new Ledger(solution, environment, streams, components, boundary, notes);
     }
 
     /** {@return the solved plant} */
@@ -132,6 +140,11 @@ public final class Ledger {
     /** {@return the exergy flows across the boundary of the plant} */
     public List<BoundaryExergy> boundary() {
         return boundary;
+    }
+
+    /** {@return what the reader of the ledger must know, in sentences; empty when there is nothing} */
+    public List<String> notes() {
+        return notes;
     }
 
     /**

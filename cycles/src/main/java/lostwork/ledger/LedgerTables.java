@@ -103,6 +103,7 @@ final class LedgerTables {
                                 ledger.efficiency().inPercent())
                         : "",
                 hasFuel() ? ledger.closure().si() : Double.NaN));
+        ledger.notes().forEach(note -> text.append(note).append('\n'));
         return text.toString();
     }
 
@@ -127,6 +128,8 @@ final class LedgerTables {
                 .put("destruction", ledger.destruction().inKilowatts())
                 .put("gap", ledger.gap().inKilowatts())
                 .closeObject();
-        return json.closeObject().toString();
+        json.openArray("notes");
+        ledger.notes().forEach(json::element);
+        return json.closeArray().closeObject().toString();
     }
 }

@@ -1,7 +1,11 @@
 package lostwork.ledger;
 
-import lostwork.exergy.FlowExergy;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
 import lostwork.exergy.ReferenceEnvironment;
+import lostwork.fluid.Fluid;
+import lostwork.fluid.FluidState;
 import lostwork.plant.Component;
 import lostwork.plant.ExergyPurpose;
 import lostwork.plant.HeatPort;
@@ -12,28 +16,54 @@ import lostwork.plant.ShaftPort;
 import lostwork.plant.Solution;
 import lostwork.plant.WirePort;
 import lostwork.quantity.Power;
+import lostwork.quantity.SpecificEnergy;
 import lostwork.quantity.Temperature;
 
 /** The exergy and the entropy that pass the ports of a solved plant. */
 final class PortExergies {
     private final Solution solution;
     private final ReferenceEnvironment environment;
+    private final Map<Fluid, ZeroState> zeros = new LinkedHashMap<>();
 
     PortExergies(Solution solution, ReferenceEnvironment environment) {
         this.solution = solution;
         this.environment = environment;
     }
 
+    /** The state that the exergy of the fluid at a port counts from, found once for each fluid. */
+    private ZeroState zeroOf(MaterialPort port) {
+        return zeros.computeIfAbsent(solution.state(port).fluid(), fluid -> ZeroState.of(fluid, environment));
+    }
+
+    /** {@return the fluids whose model does not reach the dead state, with the state that they count from} */
+    List<ZeroState> shifted() {
+        return zeros.values().stream().filter(ZeroState::isShifted).toList();
+    }
+
     StreamExergy stream(Outlet outlet, Port to) {
-        final FlowExergy parts = environment.flowExergyParts(solution.state(outlet));
+        final ZeroState zero = zeroOf(outlet);
+        final FluidState state = solution.state(outlet);
+        final double total =
+                zero.flowExergy(state.enthalpy().si(), state.entropy().si());
+        final FluidState cooled = state.broughtTo(zero.temperature(), state.pressure());
+        final double mechanical =
+                zero.flowExergy(cooled.enthalpy().si(), cooled.entropy().si());
         return new StreamExergy(
-                outlet.toString(), to.toString(), solution.value(outlet.flow()), parts.thermal(), parts.mechanical());
+                outlet.toString(),
+                to.toString(),
+                solution.value(outlet.flow()),
+                SpecificEnergy.joulesPerKilogram(total - mechanical),
+                SpecificEnergy.joulesPerKilogram(mechanical));
     }
 
     /** The exergy rate at a port, positive in the direction of the port. */
     Power rate(Port port) {
         if (port instanceof MaterialPort material) {
-            return solution.value(material.flow()).times(environment.flowExergy(solution.state(material)));
+            return Power.watts(solution.value(material.flow()).si()
+                    * zeroOf(material)
+                            .flowExergy(
+                                    solution.value(material.enthalpy()).si(),
+                                    solution.value(material.entropy()).si()));
         }
         if (port instanceof HeatPort heat) {
             return environment.heatExergy(solution.value(heat.rate()), temperature(heat));

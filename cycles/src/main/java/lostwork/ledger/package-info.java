@@ -13,6 +13,9 @@
  * is fuel, product or loss by {@link lostwork.ledger.BoundaryMarks}. Heat that passes a port whose temperature nothing
  * settles counts as passing at T₀: its exergy is destroyed inside the component.
  *
+ * <p>Where the model of a fluid does not reach the ambient temperature, as for water in frost, its exergy counts from the
+ * nearest state of the model, and the ledger says so. Destructions and differences of streams do not depend on that.
+ *
  * <p>Sources: A. Bejan, G. Tsatsaronis, M. Moran, Thermal Design and Optimization, Wiley 1996, chapter 3; A. Lazzaretto,
  * G. Tsatsaronis, Energy 31 (2006) 1257–1289.
  *

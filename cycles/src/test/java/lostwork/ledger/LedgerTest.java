@@ -78,6 +78,20 @@ class LedgerTest {
         assertTrue(ledger.of(condenser).fuel().isEmpty());
     }
 
+    /** Water has no liquid below 0 °C: the circuit counts from there, and the books close all the same. */
+    @Test
+    void booksOfAFrostyDayClose() {
+        final ReferenceEnvironment frost = ReferenceEnvironment.of(celsius(-12), bar(1.013));
+        final Ledger winter =
+                Ledger.of(solution, frost, BoundaryMarks.byDirection().with(pump.shaft(), BoundaryRole.PRODUCT));
+        assertTrue(winter.closure().si() <= 1e-9, winter.toString());
+        assertTrue(winter.toString().contains("does not reach the ambient temperature"), winter.toString());
+        assertEquals(
+                261.15 * solution.entropyGeneration(turbine).si(),
+                winter.of(turbine).destruction().si(),
+                1e-9 * winter.fuel().si());
+    }
+
     @Test
     void theRankingStartsWithTheLargestDestruction() {
         assertEquals("boiler", ledger.ranking().get(0).component());

@@ -9,7 +9,6 @@ import lostwork.plant.Sensitivities;
 import lostwork.quantity.Power;
 import lostwork.quantity.Pressure;
 import lostwork.quantity.Ratio;
-import lostwork.quantity.Temperature;
 import lostwork.quantity.TemperatureSpan;
 
 /** The recovery plant of a stream at its best evaporation pressure, with its exergy ledger. Immutable. */
@@ -25,32 +24,13 @@ public final class Recovery {
     private final MachineSize size;
     private final PressureSearch.Result search;
     private final Ledger ledger;
-    private final ReferenceEnvironment ambient;
 
-    private Recovery(
-            HotGas gas,
-            RecoveryDesign design,
-            MachineSize size,
-            PressureSearch.Result search,
-            Ledger ledger,
-            ReferenceEnvironment ambient) {
+    private Recovery(HotGas gas, RecoveryDesign design, MachineSize size, PressureSearch.Result search, Ledger ledger) {
         this.gas = gas;
         this.design = design;
         this.size = size;
         this.search = search;
         this.ledger = ledger;
-        this.ambient = ambient;
-    }
-
-    /**
-     * The ambient, or where it is colder than the model of water goes, the coldest environment of that model: the books
-     * need a state of the water in it. In a closed circuit that state cancels, so only T0 differs.
-     */
-    private static ReferenceEnvironment environmentOfTheBooks(ReferenceEnvironment ambient, RecoveryPlant plant) {
-        final Temperature coldest = Temperature.kelvin(plant.water().range().lowestTemperature());
-        return ambient.temperature().compareTo(coldest) >= 0
-                ? ambient
-                : ReferenceEnvironment.of(coldest, ambient.pressure());
     }
 
     /**
@@ -78,8 +58,8 @@ public final class Recovery {
                 continue;
             }
             requireWorthwhile(best, design);
-            final Ledger ledger = Ledger.of(best.solution(), environmentOfTheBooks(ambient, plant), plant.marks());
-            return new Recovery(gas, design, size, search, ledger, ambient);
+            final Ledger ledger = Ledger.of(best.solution(), ambient, plant.marks());
+            return new Recovery(gas, design, size, search, ledger);
         }
     }
 
@@ -176,12 +156,7 @@ public final class Recovery {
         final List<String> findings = new ArrayList<>();
         findings.add(coolingLimit());
         findings.add(pressureLimit());
-        if (!ledger.environment().temperature().equals(ambient.temperature())) {
-            findings.add(
-                    "The exergy ledger is kept against " + ledger.environment().temperature()
-                            + ", not against the ambient " + ambient.temperature()
-                            + ": the model of water does not go below. Powers and heats are not affected.");
-        }
+        findings.addAll(ledger.notes());
         return findings;
     }
 
