@@ -24,18 +24,19 @@ import lostwork.exergy.ReferenceEnvironment;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
-/** Core and fluids link into a run-time image of their own, as README.md says, and a program runs on it. */
+/** The library modules link into a run-time image of their own, as README.md says, and a program runs on it. */
 class LinkedImageTest {
     private static final Set<String> NEEDED = Set.of(
             "lostwork.core",
             "lostwork.fluids",
+            "lostwork.cycles",
             "java.measure",
             "tech.units.indriya",
             "tech.uom.lib.common",
             "jakarta.inject");
 
     @Test
-    void coreAndFluidsLinkAndRun(@TempDir Path folder) throws Exception {
+    void theLibraryLinksAndRuns(@TempDir Path folder) throws Exception {
         final ToolProvider jlink = ToolProvider.findFirst("jlink").orElse(null);
         assumeTrue(
                 jlink != null && Files.isDirectory(Path.of(System.getProperty("java.home"), "jmods")),
@@ -49,7 +50,7 @@ class LinkedImageTest {
                 "--module-path",
                 modulePath(),
                 "--add-modules",
-                "lostwork.fluids",
+                "lostwork.cycles",
                 "--no-header-files",
                 "--no-man-pages",
                 "--output",
@@ -57,7 +58,7 @@ class LinkedImageTest {
         assertEquals(0, code, said.toString(StandardCharsets.UTF_8));
 
         final String modules = run(folder, image, "--list-modules");
-        assertTrue(modules.contains("lostwork.core") && modules.contains("lostwork.fluids"), modules);
+        assertTrue(modules.contains("lostwork.core") && modules.contains("lostwork.cycles"), modules);
         assertFalse(modules.contains("commons.math3") || modules.contains("jspecify"), modules);
         assertEquals(
                 LinkedProgram.answer(ReferenceEnvironment.of(celsius(12), bar(1.013))),
@@ -65,7 +66,7 @@ class LinkedImageTest {
                         .strip());
     }
 
-    /** {@return the modules of the class path that core and fluids need, found by name} */
+    /** {@return the modules of the class path that the library needs, found by name} */
     private static String modulePath() {
         return Arrays.stream(System.getProperty("java.class.path").split(File.pathSeparator))
                 .filter(LinkedImageTest::isNeeded)
