@@ -53,7 +53,7 @@ public final class Compressor extends FlowMachine {
 
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuel(shaft).withProductRise(inlet(), outlet());
+        return ExergyPurpose.fuel(shaft).withProductRise(inlet(), outlet());
     }
 
     @Override

@@ -68,7 +68,7 @@ public final class Generator extends Component {
 
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuel(shaft).withProduct(wire);
+        return ExergyPurpose.fuel(shaft).withProduct(wire);
     }
 
     @Override

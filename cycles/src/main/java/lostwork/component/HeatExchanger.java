@@ -209,7 +209,7 @@ public final class HeatExchanger extends Component {
     /** {@return the exergy that the hot stream gives up as fuel, the rise of exergy of the cold stream as product} */
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuelDrop(hotInlet, hotOutlet).withProductRise(coldInlet, coldOutlet);
+        return ExergyPurpose.fuelDrop(hotInlet, hotOutlet).withProductRise(coldInlet, coldOutlet);
     }
 
     @Override

@@ -47,7 +47,7 @@ public final class Heater extends HeatedFlow {
 
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuel(heat).withProductRise(inlet(), outlet());
+        return ExergyPurpose.fuel(heat).withProductRise(inlet(), outlet());
     }
 
     @Override

@@ -68,7 +68,7 @@ public final class Motor extends Component {
 
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuel(wire).withProduct(shaft);
+        return ExergyPurpose.fuel(wire).withProduct(shaft);
     }
 
     @Override

@@ -61,7 +61,7 @@ public final class Pump extends FlowMachine {
 
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuel(shaft).withProductRise(inlet(), outlet());
+        return ExergyPurpose.fuel(shaft).withProductRise(inlet(), outlet());
     }
 
     @Override

@@ -53,7 +53,7 @@ public final class Turbine extends FlowMachine {
 
     @Override
     public ExergyPurpose purpose() {
-        return ExergyPurpose.dissipative().withFuelDrop(inlet(), outlet()).withProduct(shaft);
+        return ExergyPurpose.fuelDrop(inlet(), outlet()).withProduct(shaft);
     }
 
     @Override

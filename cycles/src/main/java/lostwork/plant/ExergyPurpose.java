@@ -31,9 +31,28 @@ public final class ExergyPurpose {
         this.product = product;
     }
 
-    /** {@return no fuel and no product: the start of every other purpose, and the whole of a dissipative one} */
+    /** {@return no fuel and no product: the purpose of a component that only destroys exergy} */
     public static ExergyPurpose dissipative() {
         return DISSIPATIVE;
+    }
+
+    /**
+     * {@return the purpose of a component that uses up the exergy at a port}
+     *
+     * @param port the port
+     */
+    public static ExergyPurpose fuel(Port port) {
+        return DISSIPATIVE.withFuel(port);
+    }
+
+    /**
+     * {@return the purpose of a component that uses up the drop of exergy from one port to another}
+     *
+     * @param from the port of higher exergy, as a rule the inlet
+     * @param to the port of lower exergy
+     */
+    public static ExergyPurpose fuelDrop(Port from, Port to) {
+        return DISSIPATIVE.withFuelDrop(from, to);
     }
 
     /**
