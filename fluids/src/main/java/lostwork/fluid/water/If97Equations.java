@@ -18,6 +18,8 @@ final class If97Equations {
     static final double REGION_5_FROM_K = 1073.15;
 
     static final double HIGHEST_K = 2273.15;
+    /** Where searches in region 5 start that have no better guess. */
+    static final double REGION_5_MIDDLE_K = 1500;
     /** The release says "above 0"; below this a state of water vapour is of no use, and logarithms of 0 are avoided. */
     static final double LOWEST_PA = 1;
 
@@ -44,8 +46,10 @@ final class If97Equations {
     final If97Gibbs region2 = new If97Gibbs(
             2, table("r7-97-table-11-region2-residual"), table("r7-97-table-10-region2-ideal"), 272.15, 1078);
     final If97Region3 region3 = new If97Region3(table("r7-97-table-30-region3"));
+    /** Its limits leave room for the pairs of {@link If97Region5Start}, which form a rectangle about the region. */
     final If97Gibbs region5 = new If97Gibbs(
-            5, table("r7-97-table-38-region5-residual"), table("r7-97-table-37-region5-ideal"), 1060, 2280);
+            5, table("r7-97-table-38-region5-residual"), table("r7-97-table-37-region5-ideal"), 950, 2300);
+
     final If97Boundary boundary23 = new If97Boundary(table("r7-97-table-01-b23"));
     /** Pressure where regions 1, 2 and 3 meet. */
     final double region3FromPressure = saturation.pressure(REGION_3_FROM_K);

@@ -61,13 +61,18 @@ final class If97Gibbs {
         this.ideal = ideal == null ? null : new IdealPart(ideal);
     }
 
-    /** Writes γ and its derivatives by π (f) and τ (t) into the workspace. */
+    /** Prepares the workspace for evaluations at one pressure. */
+    private void fixPressure(double pressure, Workspace w) {
+        residual.fixFirst(pressureScale * pressure + pressureOffset, w);
+    }
+
+    /** Writes γ and its derivatives by π (f) and τ (t) into the workspace, after {@link #fixPressure}. */
     private void gamma(double temperature, double pressure, Workspace w) {
         final double pi = pressure / referencePressure;
         final double tau = referenceTemperature / temperature;
         final double x = pressureScale * pressure + pressureOffset;
         final double y = tau + temperatureOffset;
-        residual.evaluate(x, y, w);
+        residual.evaluate(y, w);
         final double byX = pressureFactor / x;
         final double byY = 1 / y;
         w.f *= byX;
@@ -80,11 +85,11 @@ final class If97Gibbs {
         }
     }
 
-    /** Writes γ, γτ (t) and γττ (tt) into the workspace; all that h, s and cp need. */
+    /** Writes γ, γτ (t) and γττ (tt) into the workspace, after {@link #fixPressure}; all that h, s and cp need. */
     private void gammaByTau(double temperature, double pressure, Workspace w) {
         final double tau = referenceTemperature / temperature;
         final double y = tau + temperatureOffset;
-        residual.evaluateBySecond(pressureScale * pressure + pressureOffset, y, w);
+        residual.evaluateBySecond(y, w);
         final double byY = 1 / y;
         w.t *= byY;
         w.tt *= byY * byY;
@@ -129,6 +134,7 @@ final class If97Gibbs {
 
     /** Evaluates the properties at a temperature in K and a pressure in Pa. */
     void evaluate(double temperature, double pressure, Workspace w, StatePoint out) {
+        fixPressure(pressure, w);
         gamma(temperature, pressure, w);
         final double tau = referenceTemperature / temperature;
         fill(
@@ -143,18 +149,21 @@ final class If97Gibbs {
 
     /** {@return h in J/kg} */
     double enthalpy(double temperature, double pressure, Workspace w) {
+        fixPressure(pressure, w);
         gammaByTau(temperature, pressure, w);
         return gasConstant * referenceTemperature * w.t;
     }
 
     /** {@return s in J/(kg K)} */
     double entropy(double temperature, double pressure, Workspace w) {
+        fixPressure(pressure, w);
         gammaByTau(temperature, pressure, w);
         return gasConstant * (referenceTemperature / temperature * w.t - w.value);
     }
 
     /** Finds the state at a pressure and an enthalpy; {@code start} is a first guess of the temperature in K. */
     void atPressureEnthalpy(double pressure, double enthalpy, double start, Workspace w, StatePoint out) {
+        fixPressure(pressure, w);
         double lowest = lowestTemperature;
         double highest = highestTemperature;
         double t = Math.max(lowest, Math.min(highest, start));
@@ -192,6 +201,7 @@ final class If97Gibbs {
 
     /** Finds the state at a pressure and an entropy; {@code start} is a first guess of the temperature in K. */
     void atPressureEntropy(double pressure, double entropy, double start, Workspace w, StatePoint out) {
+        fixPressure(pressure, w);
         double lowest = lowestTemperature;
         double highest = highestTemperature;
         double t = Math.max(lowest, Math.min(highest, start));

@@ -7,7 +7,7 @@ import lostwork.fluid.StatePoint;
  * States at a pressure and a property that rises with temperature: enthalpy or entropy.
  *
  * <p>Along an isobar the regions follow each other. The property at their borders decides which one a state lies in; the
- * backward equation of the region gives a first guess, and Newton's method on the basic equation makes it exact, so that
+ * backward equation of the region, or {@link If97Region5Start}, gives a first guess, and Newton's method on the basic equation makes it exact, so that
  * the property asked for is returned to rounding. At most borders the property makes a small step (R7-97(2012), section
  * 10). Inside a step up, a value belongs to no state; at 623.15 K and 1073.15 K the equation above the border, and between
  * regions 3 and 2 the one below, is then followed a little beyond it. Inside a step down, two states have the value, and
@@ -27,6 +27,7 @@ abstract class If97PressureFlash {
     private final Fence end1;
     private final Fence begin2;
     private final Fence end2;
+    private final Fence hot;
 
     private If97PressureFlash(If97Equations equations, If97Starts starts) {
         this.equations = equations;
@@ -42,6 +43,8 @@ abstract class If97PressureFlash {
         end1 = fence(p -> of(equations.region1, If97Equations.REGION_3_FROM_K, p, w), middle, highest);
         begin2 = fence(p -> of(equations.region2, equations.boundary23.temperature(p), p, w), middle, highest);
         end2 = fence(p -> of(equations.region2, If97Equations.REGION_5_FROM_K, p, w), lowest, highest);
+        final double highest5 = root(If97Equations.REGION_5_HIGHEST_PA);
+        hot = fence(p -> of(equations.region5, If97Equations.HIGHEST_K, p, w), lowest, highest5);
     }
 
     private static Fence fence(DoubleUnaryOperator ofPressure, double from, double to) {
@@ -119,19 +122,21 @@ abstract class If97PressureFlash {
     }
 
     private void vapour(double pressure, double root, double value, Workspace w, StatePoint out) {
-        if (pressure >= lowestSaturationPressure && end2.isAbove(root, value)
-                || value <= of(equations.region2, If97Equations.REGION_5_FROM_K, pressure, w)) {
+        final boolean fenced = pressure >= lowestSaturationPressure;
+        if (fenced && end2.isAbove(root, value)
+                || !(fenced && end2.isBelow(root, value))
+                        && value <= of(equations.region2, If97Equations.REGION_5_FROM_K, pressure, w)) {
             inRegion(equations.region2, pressure, value, startInRegion2(pressure, value, w), w, out);
         } else {
             requireInRange(
                     pressure <= If97Equations.REGION_5_HIGHEST_PA
-                            && value <= of(equations.region5, If97Equations.HIGHEST_K, pressure, w),
-                    pressure >= lowestSaturationPressure ? equations.region1 : equations.region2,
+                            && (fenced && hot.isAbove(root, value)
+                                    || value <= of(equations.region5, If97Equations.HIGHEST_K, pressure, w)),
+                    fenced ? equations.region1 : equations.region2,
                     pressure,
                     value,
                     w);
-            // Region 5 is nearly ideal, with a cp that varies little; the middle is a start.
-            inRegion(equations.region5, pressure, value, 1500, w, out);
+            inRegion(equations.region5, pressure, value, startInRegion5(pressure, value), w, out);
         }
     }
 
@@ -189,6 +194,8 @@ abstract class If97PressureFlash {
 
     abstract double startInRegion2(double pressure, double value, Workspace w);
 
+    abstract double startInRegion5(double pressure, double value);
+
     abstract boolean isDense(double pressure, double value);
 
     abstract void inRegion(
@@ -198,8 +205,19 @@ abstract class If97PressureFlash {
 
     /** By enthalpy in J/kg. */
     static final class ByEnthalpy extends If97PressureFlash {
+        private final If97Region5Start start5;
+
         ByEnthalpy(If97Equations equations, If97Starts starts) {
             super(equations, starts);
+            final Workspace w = Workspace.ofThread();
+            final StatePoint point = new StatePoint();
+            start5 = new If97Region5Start(
+                    (p, h) -> {
+                        equations.region5.atPressureEnthalpy(p, h, If97Equations.REGION_5_MIDDLE_K, w, point);
+                        return point.temperature;
+                    },
+                    equations.region5.enthalpy(If97Equations.REGION_5_FROM_K, If97Equations.REGION_5_HIGHEST_PA, w),
+                    equations.region5.enthalpy(If97Equations.HIGHEST_K, If97Equations.LOWEST_PA, w));
         }
 
         @Override
@@ -238,6 +256,11 @@ abstract class If97PressureFlash {
         }
 
         @Override
+        double startInRegion5(double pressure, double value) {
+            return start5.temperature(pressure, value);
+        }
+
+        @Override
         boolean isDense(double pressure, double value) {
             return value <= starts.enthalpy3ab(pressure);
         }
@@ -261,8 +284,29 @@ abstract class If97PressureFlash {
 
     /** By entropy in J/(kg K). */
     static final class ByEntropy extends If97PressureFlash {
+        private final If97Region5Start start5;
+
         ByEntropy(If97Equations equations, If97Starts starts) {
             super(equations, starts);
+            final Workspace w = Workspace.ofThread();
+            final StatePoint point = new StatePoint();
+            start5 = new If97Region5Start(
+                    (p, value) -> {
+                        equations.region5.atPressureEntropy(
+                                p, value - logPart(p), If97Equations.REGION_5_MIDDLE_K, w, point);
+                        return point.temperature;
+                    },
+                    withoutLogPart(If97Equations.REGION_5_FROM_K, If97Equations.REGION_5_HIGHEST_PA, w),
+                    withoutLogPart(If97Equations.HIGHEST_K, If97Equations.LOWEST_PA, w));
+        }
+
+        /** Entropy plus this varies little with pressure, as in an ideal gas. */
+        private static double logPart(double pressure) {
+            return If97Starts.GAS_CONSTANT * Math.log(pressure);
+        }
+
+        private double withoutLogPart(double temperature, double pressure, Workspace w) {
+            return equations.region5.entropy(temperature, pressure, w) + logPart(pressure);
         }
 
         @Override
@@ -298,6 +342,11 @@ abstract class If97PressureFlash {
         @Override
         double startInRegion2(double pressure, double value, Workspace w) {
             return starts.region2Entropy(pressure, value, w);
+        }
+
+        @Override
+        double startInRegion5(double pressure, double value) {
+            return start5.temperature(pressure, value + logPart(pressure));
         }
 
         @Override

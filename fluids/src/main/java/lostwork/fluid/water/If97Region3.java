@@ -41,7 +41,8 @@ final class If97Region3 {
     /** Writes φ and the logarithmic derivatives δ φδ (f), τ φτ (t), δ² φδδ (ff), τ² φττ (tt), δ τ φδτ (ft). */
     private void phi(double density, double temperature, Workspace w) {
         final double delta = density / referenceDensity;
-        sum.evaluate(delta, referenceTemperature / temperature, w);
+        sum.fixFirst(delta, w);
+        sum.evaluate(referenceTemperature / temperature, w);
         w.value += logarithmCoefficient * Math.log(delta);
         w.f += logarithmCoefficient;
         w.ff -= logarithmCoefficient;

@@ -137,16 +137,24 @@ final class PowerSum {
     }
 
     /**
+     * Makes the powers of the first argument, for evaluations at several second ones.
+     *
+     * @param x first argument, not 0
+     * @param space the room of this thread; no other sum may use it before the last of the evaluations
+     */
+    void fixFirst(double x, Workspace space) {
+        fill(firstProgram, x, space.firstPowers);
+    }
+
+    /**
      * Writes the sum and its logarithmic derivatives by the second argument into the workspace.
      *
-     * @param x first argument
      * @param y second argument, not 0
-     * @param space the room of this thread
+     * @param space the room of this thread, with the powers of {@link #fixFirst}
      */
-    void evaluateBySecond(double x, double y, Workspace space) {
+    void evaluateBySecond(double y, Workspace space) {
         final double[] xs = space.firstPowers;
         final double[] ys = space.secondPowers;
-        fill(firstProgram, x, xs);
         fill(secondProgram, y, ys);
         double value = 0;
         double t = 0;
@@ -165,14 +173,12 @@ final class PowerSum {
     /**
      * Writes the sum and its logarithmic derivatives into the workspace.
      *
-     * @param x first argument, not 0
      * @param y second argument, not 0
-     * @param space the room of this thread
+     * @param space the room of this thread, with the powers of {@link #fixFirst}
      */
-    void evaluate(double x, double y, Workspace space) {
+    void evaluate(double y, Workspace space) {
         final double[] xs = space.firstPowers;
         final double[] ys = space.secondPowers;
-        fill(firstProgram, x, xs);
         fill(secondProgram, y, ys);
         double value = 0;
         double f = 0;
