@@ -1,5 +1,6 @@
 package lostwork.plant;
 
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import lostwork.quantity.EntropyRate;
@@ -99,6 +100,6 @@ public final class Closure {
 
     /** {@return the entropy that each component generates, supplies and discharges left out} */
     public Map<Component, EntropyRate> entropyGeneration() {
-        return java.util.Collections.unmodifiableMap(generation);
+        return Collections.unmodifiableMap(generation);
     }
 }

@@ -2,6 +2,7 @@ package lostwork.plant;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 
 /**
  * What a component is for in terms of exergy: what it uses up (its fuel) and what it is there to make (its product).
@@ -23,8 +24,7 @@ public final class ExergyPurpose {
      * @param port the port that counts
      * @param less the port whose exergy is taken away; null for none
      */
-    public record Term(
-            Port port, @org.jspecify.annotations.Nullable Port less) {}
+    public record Term(Port port, @Nullable Port less) {}
 
     private ExergyPurpose(List<Term> fuel, List<Term> product) {
         this.fuel = fuel;

@@ -10,6 +10,11 @@ import lostwork.fluid.FluidModel;
 import lostwork.fluid.FluidRange;
 import lostwork.plant.kernel.SlotScale;
 import lostwork.quantity.QuantityKind;
+import lostwork.quantity.Ratio;
+import lostwork.quantity.SpecificEnergy;
+import lostwork.quantity.SpecificEntropy;
+import lostwork.quantity.Temperature;
+import lostwork.quantity.TemperatureSpan;
 
 /**
  * The slots of a plant: one for each physical value, shared by all variables that name it. Slots are numbered in an order
@@ -214,10 +219,10 @@ final class Layout {
 
     /** Sizes that count against the value itself: everything but ratios, temperatures and spans. */
     private static boolean isProportional(QuantityKind<?, ?> kind) {
-        return kind != lostwork.quantity.Ratio.KIND
-                && kind != lostwork.quantity.Temperature.KIND
-                && kind != lostwork.quantity.TemperatureSpan.KIND
-                && kind != lostwork.quantity.SpecificEnergy.KIND
-                && kind != lostwork.quantity.SpecificEntropy.KIND;
+        return kind != Ratio.KIND
+                && kind != Temperature.KIND
+                && kind != TemperatureSpan.KIND
+                && kind != SpecificEnergy.KIND
+                && kind != SpecificEntropy.KIND;
     }
 }

@@ -6,6 +6,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.PriorityQueue;
+import java.util.function.IntPredicate;
 import lostwork.fluid.FluidModel;
 import lostwork.fluid.SaturationModel;
 import lostwork.fluid.StatePoint;
@@ -13,6 +14,7 @@ import lostwork.plant.kernel.StartValues;
 import lostwork.plant.kernel.Workspace;
 import lostwork.quantity.OutOfRangeException;
 import lostwork.quantity.Power;
+import lostwork.quantity.Pressure;
 import lostwork.quantity.Ratio;
 import lostwork.quantity.Temperature;
 import lostwork.quantity.TemperatureSpan;
@@ -65,7 +67,7 @@ final class NeighbourStarts implements StartValues {
             final Layout.Slot slot = layout.slots.get(entry.tape().slot(k));
             if (slot.role() == SlotRole.PRESSURE) {
                 states.add(slot.state());
-            } else if (!slot.kind().dimension().equals(lostwork.quantity.Pressure.KIND.dimension())) {
+            } else if (!slot.kind().dimension().equals(Pressure.KIND.dimension())) {
                 return;
             }
         }
@@ -257,7 +259,7 @@ final class NeighbourStarts implements StartValues {
     }
 
     /** The nearest state, the own one first, that fulfils a condition; −1 for none (Dijkstra). */
-    private int nearestWhere(int from, boolean sameFluid, java.util.function.IntPredicate wanted) {
+    private int nearestWhere(int from, boolean sameFluid, IntPredicate wanted) {
         final FluidModel model = layout.states.get(from).model();
         final int[] distance = new int[layout.states.size()];
         Arrays.fill(distance, Integer.MAX_VALUE);

@@ -6,7 +6,9 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
+import lostwork.fluid.StatePoint;
 import lostwork.plant.kernel.BlockFailure;
 import lostwork.plant.kernel.BlockSolver;
 import lostwork.plant.kernel.EquationSystem;
@@ -215,7 +217,7 @@ public final class SolvePlan {
             final double p = w.get(state.slot(SlotRole.PRESSURE));
             final double h = w.get(state.slot(SlotRole.ENTHALPY));
             try {
-                state.model().atPressureEnthalpy(p, h, new lostwork.fluid.StatePoint());
+                state.model().atPressureEnthalpy(p, h, new StatePoint());
             } catch (OutOfRangeException e) {
                 return new PlantSolveException(
                         PlantSolveException.Reason.OUTSIDE_RANGE,
@@ -243,7 +245,7 @@ public final class SolvePlan {
                 .toList();
         final List<Variable<?>> unknowns = Arrays.stream(block)
                 .mapToObj(e -> variableOf(system.matched(e)))
-                .collect(java.util.stream.Collectors.toCollection(ArrayList::new));
+                .collect(Collectors.toCollection(ArrayList::new));
         final String head = "plant \"" + plant.name() + "\": ";
         return switch (failure.reason()) {
             case SINGULAR -> singular(head, failure, unknowns);
@@ -258,7 +260,7 @@ public final class SolvePlan {
             case CANCELLED ->
                 new PlantSolveException(
                         PlantSolveException.Reason.CANCELLED, head + "cancelled by the caller", worst, unknowns);
-            default ->
+            case NOT_MET ->
                 new PlantSolveException(
                         PlantSolveException.Reason.NOT_MET,
                         head + "no values of " + Diagnosis.join(unknowns) + " within their bounds meet "
@@ -343,7 +345,7 @@ public final class SolvePlan {
                     .append(Arrays.stream(block)
                             .mapToObj(e -> variableOf(system.matched(e)) + " from "
                                     + entries.get(e).equation().words())
-                            .collect(java.util.stream.Collectors.joining("; ")))
+                            .collect(Collectors.joining("; ")))
                     .append('\n');
         }
         return text.toString();

@@ -1,5 +1,6 @@
 package lostwork.plant.kernel;
 
+import java.util.Arrays;
 import lostwork.solve.DenseLu;
 
 /** Derivatives of a solution by one pass backwards through its transposed blocks. */
@@ -42,7 +43,7 @@ public final class Adjoint {
         for (int i = 0; i < n; i++) {
             final Tape tape = system.equation(block[i]);
             tape.evaluate(w);
-            gradients[i] = java.util.Arrays.copyOf(w.gradient, tape.size());
+            gradients[i] = Arrays.copyOf(w.gradient, tape.size());
             for (int j = 0; j < n; j++) {
                 final int place = tape.placeOf(system.matched(block[j]));
                 matrix[i * n + j] = place < 0 ? 0 : gradients[i][place];

@@ -4,6 +4,8 @@ package lostwork.plant.kernel;
 public final class BlockFailure extends RuntimeException {
     private static final long serialVersionUID = 1L;
 
+    private static final double[] NONE = {};
+
     /** Why a block could not be solved. */
     public enum Reason {
         /** The iteration ended with a residual that is not zero. */
@@ -12,8 +14,6 @@ public final class BlockFailure extends RuntimeException {
         SINGULAR,
         /** Temperature and pressure of a state lie on the saturation line and do not tell liquid from vapour. */
         SATURATED,
-        /** The equations are met only outside the range of a fluid. */
-        OUTSIDE_RANGE,
         /** The time limit ran out. */
         OUT_OF_TIME,
         /** The solve was cancelled. */
@@ -33,11 +33,15 @@ public final class BlockFailure extends RuntimeException {
     /** For a singular block, how far each unknown may move freely; else empty. */
     private final transient double[] freedom;
 
+    BlockFailure(Reason reason, int block, int[] equations, double[] residuals) {
+        this(reason, block, equations, residuals, NONE, NONE);
+    }
+
     BlockFailure(Reason reason, int block, int[] equations, double[] residuals, double[] dependency, double[] freedom) {
         super(reason + " in block " + block, null, false, false);
         this.reason = reason;
         this.block = block;
-        this.equations = equations;
+        this.equations = equations.clone();
         this.residuals = residuals;
         this.dependency = dependency;
         this.freedom = freedom;

@@ -10,6 +10,15 @@ public final class EquationSystem {
     /** How many workspaces are kept for the next solves. */
     private static final int KEPT = 4;
 
+    /** Scaled residual at which an equation counts as met where rounding prevents more. */
+    static final double ACCEPTED = 1e-9;
+
+    /**
+     * An equation whose scaled slope, or a block whose smallest singular value against its largest, is below this does not
+     * determine its unknowns.
+     */
+    static final double SINGULAR = 1e-9;
+
     private final Tape[] equations;
     private final int[] matched;
     private final List<int[]> blocks;

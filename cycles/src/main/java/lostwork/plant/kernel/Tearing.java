@@ -21,6 +21,9 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
     /** How many cuts of a block are worth trying. */
     private static final int CUTS = 4;
 
+    /** An unknown whose limits are further apart than this many natural scales cannot be scanned. */
+    private static final double WIDEST = 1e9;
+
     /**
      * {@return the cheapest cuts of a block, those without nested iterations first; empty when it cannot be cut at one
      * place}
@@ -50,9 +53,6 @@ record Tearing(int slot, int residual, int[] equations, int[] slots) {
         byCost.forEach(all::addAll);
         return all.subList(0, Math.min(CUTS, all.size()));
     }
-
-    /** An unknown whose limits are further apart than this many natural scales cannot be scanned. */
-    private static final double WIDEST = 1e9;
 
     private static @Nullable Tearing cutAt(EquationSystem system, int[] block, int cut, int nestedAllowed) {
         final int n = block.length;
