@@ -14,8 +14,9 @@
  *   <li>region 4: the saturation pressure p(T), an equation of its own.
  * </ul>
  * <p>States from other pairs than temperature and pressure start from the backward equations of the releases, which are
- * good to 25 mK, and are finished by Newton's method on the fundamental equation: the value that was asked for is returned
- * to about 1e-13. In region 3 density and temperature are searched together, which stays regular at the critical point.
+ * good to 25 mK, or in region 5, which has none, from a polynomial made from its own equation, good to 50 mK. They are
+ * finished by Newton's method on the fundamental equation: the value that was asked for is returned to about 1e-13. In
+ * region 3 density and temperature are searched together, which stays regular at the critical point.
  *
  * <h2>Range</h2>
  * <table>
