@@ -3,7 +3,6 @@ package lostwork.component;
 import lostwork.plant.Component;
 import lostwork.plant.Equations;
 import lostwork.plant.ExergyPurpose;
-import lostwork.plant.Expression;
 import lostwork.plant.HeatOutlet;
 import lostwork.plant.ShaftInlet;
 import lostwork.plant.Variable;
@@ -73,10 +72,6 @@ public final class Generator extends Component {
 
     @Override
     protected void describe(Equations e) {
-        e.model("efficiency", wire.power(), efficiency.times(shaft.power()));
-        e.law("energy balance", heatLoss.rate(), shaft.power().minus(wire.power()));
-        e.assume("no losses", efficiency, Ratio.percent(100));
-        e.require("an efficiency above 0 %", efficiency);
-        e.require("an efficiency of at most 100 %", Expression.number(1).minus(efficiency));
+        PowerLoss.describe(e, efficiency, "an efficiency", shaft.power(), wire.power(), heatLoss);
     }
 }

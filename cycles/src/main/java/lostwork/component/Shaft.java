@@ -131,14 +131,7 @@ public final class Shaft extends Component {
 
     @Override
     protected void describe(Equations e) {
-        final Expression taken = sum(driving);
-        final Expression delivered = sum(driven);
-        e.model("mechanical efficiency", delivered, mechanicalEfficiency.times(taken));
-        e.law("energy balance", heatLoss.rate(), taken.minus(delivered));
-        e.assume("no losses", mechanicalEfficiency, Ratio.percent(100));
-        e.require("a mechanical efficiency above 0 %", mechanicalEfficiency);
-        e.require(
-                "a mechanical efficiency of at most 100 %", Expression.number(1).minus(mechanicalEfficiency));
+        PowerLoss.describe(e, mechanicalEfficiency, "a mechanical efficiency", sum(driving), sum(driven), heatLoss);
     }
 
     private static Expression sum(List<? extends ShaftPort> ports) {

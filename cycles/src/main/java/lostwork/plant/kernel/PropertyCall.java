@@ -130,10 +130,6 @@ final class PropertyCall {
                 set(point.enthalpy, point.volume - second * point.volumeByTemperature, point.heatCapacity);
                 ambiguous = isSaturated(second, p);
             }
-            case ENTROPY_PT -> {
-                model.atTemperaturePressure(second, p, point);
-                set(point.entropy, -point.volumeByTemperature, point.heatCapacity / second);
-            }
             case ENTHALPY_PX -> {
                 saturate(p);
                 final double span = vapour.enthalpy - liquid.enthalpy;
@@ -256,7 +252,7 @@ final class PropertyCall {
                 final double low = entropyAt(cold, p);
                 yield clamp(second, low, entropyAt(hot, p));
             }
-            case ENTHALPY_PT, ENTROPY_PT -> clamp(second, cold, hot);
+            case ENTHALPY_PT -> clamp(second, cold, hot);
             case ENTHALPY_SUPERHEATED ->
                 clamp(second, 0, hot - requireSaturation().temperature(p));
             case ENTHALPY_SUBCOOLED -> clamp(second, 0, requireSaturation().temperature(p) - cold);
@@ -269,7 +265,7 @@ final class PropertyCall {
         return switch (kind) {
             case TEMPERATURE_PH, ENTROPY_PH, VOLUME_PH -> enthalpyAt(t, p);
             case ENTHALPY_PS -> entropyAt(t, p);
-            case ENTHALPY_PT, ENTROPY_PT -> t;
+            case ENTHALPY_PT -> t;
             default -> 0;
         };
     }

@@ -20,8 +20,6 @@ public enum PropertyKind {
     ENTHALPY_SUPERHEATED(2),
     /** Enthalpy from pressure and the span of temperature below saturation. */
     ENTHALPY_SUBCOOLED(2),
-    /** Entropy from pressure and temperature. */
-    ENTROPY_PT(2),
     /** Saturation temperature from pressure. */
     SATURATION_TEMPERATURE_P(1);
 

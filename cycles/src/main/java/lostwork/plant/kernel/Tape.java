@@ -240,11 +240,6 @@ public final class Tape {
         return false;
     }
 
-    /** {@return the left side after an evaluation} */
-    double leftValue(Workspace w) {
-        return w.value[left];
-    }
-
     private boolean isAffine(int slotNode) {
         // 0: does not depend on the slot, 1: affine in it, 2: anything else
         final int[] degree = new int[ops.length];

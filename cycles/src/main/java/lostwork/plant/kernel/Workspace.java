@@ -96,17 +96,6 @@ public final class Workspace {
     }
 
     /**
-     * Evaluates an equation, values only.
-     *
-     * @param tape the equation
-     * @return the value of its left side
-     */
-    public double leftSide(Tape tape) {
-        tape.forward(this);
-        return tape.leftValue(this);
-    }
-
-    /**
      * {@return the value of a slot at which an equation holds that is affine in it; NaN when the equation does not settle
      * it}
      *
